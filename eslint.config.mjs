@@ -2,9 +2,8 @@ import js from '@eslint/js';
 import angular from 'angular-eslint';
 import tseslint from 'typescript-eslint';
 
-const noBareZod = {
-  name: 'zod',
-  importNames: ['z'],
+const noNamedZod = {
+  selector: "ImportDeclaration[source.value='zod'] > ImportSpecifier",
   message: "Write `import * as z from 'zod'`: the named export keeps every locale in the bundle.",
 };
 
@@ -45,7 +44,7 @@ export default tseslint.config(
       ],
       '@typescript-eslint/consistent-type-imports': 'error',
       '@typescript-eslint/no-explicit-any': 'error',
-      'no-restricted-imports': ['error', { paths: [noBareZod] }],
+      'no-restricted-syntax': ['error', noNamedZod],
       eqeqeq: ['error', 'smart'],
     },
   },
@@ -62,11 +61,9 @@ export default tseslint.config(
       '@angular-eslint/directive-class-suffix': 'off',
       '@angular-eslint/prefer-on-push-component-change-detection': 'error',
       'no-console': 'error',
-      'no-restricted-imports': 'off',
       '@typescript-eslint/no-restricted-imports': [
         'error',
         {
-          paths: [noBareZod],
           patterns: [
             {
               group: ['@shared/**/*-contract'],
