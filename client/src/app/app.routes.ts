@@ -1,0 +1,35 @@
+import type { Routes } from '@angular/router';
+import { signedIn } from './session/session-guard';
+import { landing } from './shell/landing-guard';
+import signInRoutes from './sign-in/sign-in.routes';
+
+/**
+ * The features inside the frame: one line each, `<feature>/<feature>.routes.ts` exporting its
+ * routes by default. What the navigation shows of them stands in `shell/navigation.ts`.
+ */
+const features: Routes = [
+  { path: 'account', loadChildren: () => import('./sign-in/account.routes') },
+];
+
+export const routes: Routes = [
+  ...signInRoutes,
+  {
+    path: '',
+    canActivate: [signedIn],
+    loadComponent: () => import('./shell/shell').then((m) => m.Shell),
+    children: [
+      { path: '', pathMatch: 'full', canActivate: [landing], children: [] },
+      ...features,
+      {
+        path: 'not-yours',
+        title: $localize`:@@shell.not-yours:Not yours to see`,
+        loadComponent: () => import('./shell/not-yours').then((m) => m.NotYours),
+      },
+      {
+        path: '**',
+        title: $localize`:@@shell.not-found:Nothing is here`,
+        loadComponent: () => import('./shell/not-found').then((m) => m.NotFound),
+      },
+    ],
+  },
+];

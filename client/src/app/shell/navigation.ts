@@ -1,0 +1,40 @@
+import type { RoleName } from '../session/session';
+import type { IconName } from '../ui/icon/icon-paths';
+
+/** An entry of the navigation; who holds none of its abilities is not shown it. */
+export interface NavigationItem {
+  /** Path of the feature in `app.routes.ts`. */
+  readonly path: string;
+  readonly label: string;
+  readonly icon: IconName;
+  readonly anyOf: readonly string[];
+}
+
+/** In the order in which they stand in the header; what does not fit goes under "More". */
+export const navigation: readonly NavigationItem[] = [];
+
+/** Where each role starts, the broadest role of a person deciding. */
+const starts: readonly (readonly [RoleName, string])[] = [
+  ['regional-facility-manager', 'board'],
+  ['technician', 'today'],
+  ['store-manager', 'shift'],
+  ['shift-lead', 'shift'],
+  ['account-owner', 'digests'],
+  ['trainer', 'procedures'],
+  ['administrator', 'stores'],
+];
+
+/**
+ * The first page for a person: that of their role if they may see it, else the first entry they
+ * may see, else their account.
+ */
+export function landingPath(
+  roles: readonly RoleName[],
+  can: (ability: string) => boolean,
+  items: readonly NavigationItem[] = navigation,
+): string {
+  const allowed = items.filter((item) => item.anyOf.some(can));
+  const own = starts.filter(([role]) => roles.includes(role)).map(([, path]) => path);
+  const start = own.find((path) => allowed.some((item) => item.path === path));
+  return `/${start ?? allowed[0]?.path ?? 'account'}`;
+}
