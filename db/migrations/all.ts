@@ -11,6 +11,7 @@ import { createMail } from './20261201090900-create-mail';
 import { createCompliance } from './20261201091000-create-compliance';
 import { createAudit } from './20261201091100-create-audit';
 import { createWorkRecords } from './20261201091200-create-work-records';
+import { createRateLimits } from './20261201091300-create-rate-limits';
 import type { Migration } from './migration';
 
 /** Every migration in order. A list, as file patterns do not survive bundling. */
@@ -28,4 +29,5 @@ export const migrations: readonly Migration[] = [
   createCompliance,
   createAudit,
   createWorkRecords,
+  createRateLimits,
 ];

@@ -1,0 +1,7 @@
+import type { Routes } from './http/routes';
+import { signInRoutes } from './sign-in/sign-in-routes';
+
+/** The only file that lists every feature. */
+export function registerFeatures(routes: Routes): void {
+  signInRoutes(routes);
+}
