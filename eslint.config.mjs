@@ -11,7 +11,7 @@ export default tseslint.config(
   { ignores: ['dist/', '.local/', '.angular/', 'node_modules/', 'test/reference/data/'] },
   js.configs.recommended,
   {
-    files: ['**/*.mjs', '**/*.cjs'],
+    files: ['**/*.mjs', '**/*.cjs', '**/*.js'],
     languageOptions: {
       globals: {
         process: 'readonly',
