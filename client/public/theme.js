@@ -1,3 +1,4 @@
+/* global document, localStorage */
 // Sets the remembered theme before the first paint. Without one, the system's own holds.
 (function () {
   try {

@@ -1,6 +1,6 @@
 import { provideHttpClient, withFetch, withInterceptors } from '@angular/common/http';
 import type { ApplicationConfig } from '@angular/core';
-import { ErrorHandler, provideBrowserGlobalErrorListeners } from '@angular/core';
+import { ErrorHandler, inject, provideBrowserGlobalErrorListeners } from '@angular/core';
 import {
   provideRouter,
   TitleStrategy,
@@ -11,8 +11,10 @@ import {
 import { routes } from './app.routes';
 import { AppErrorHandler } from './problems/app-error-handler';
 import { problemInterceptor } from './problems/problem-interceptor';
+import { Session } from './session/session';
 import { sessionInterceptor } from './session/session-interceptor';
 import { PageTitle } from './shell/page-title';
+import { VIEWER_ZONE } from './ui/text/viewer-zone';
 
 export const appConfig: ApplicationConfig = {
   providers: [
@@ -26,6 +28,13 @@ export const appConfig: ApplicationConfig = {
       withRouterConfig({ paramsInheritanceStrategy: 'always' }),
     ),
     { provide: TitleStrategy, useExisting: PageTitle },
+    {
+      provide: VIEWER_ZONE,
+      useFactory: () => {
+        const session = inject(Session);
+        return () => session.timeZone();
+      },
+    },
     { provide: ErrorHandler, useClass: AppErrorHandler },
   ],
 };

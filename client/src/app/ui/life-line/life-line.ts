@@ -1,0 +1,75 @@
+import {
+  ChangeDetectionStrategy,
+  Component,
+  computed,
+  inject,
+  input,
+  LOCALE_ID,
+  signal,
+} from '@angular/core';
+import { RouterLink } from '@angular/router';
+import { Icon } from '../icon/icon';
+import type { IconName } from '../icon/icon-paths';
+import { TimeInZonePipe } from '../text/time-in-zone-pipe';
+import type { LifeKind, LifeMark } from './lay-out-marks';
+import { axisTicks, layOutMarks } from './lay-out-marks';
+import { lifeWord } from './life-word';
+
+export interface LifeEntry extends LifeMark {
+  /** What: "Seal weeping at the drain slot". */
+  readonly what: string;
+  /** Who: "M. Ortega, technician". */
+  readonly who: string;
+  readonly link?: readonly unknown[];
+}
+
+const ICONS: Record<LifeKind, IconName> = {
+  installed: 'add',
+  inspected: 'check',
+  found: 'finding',
+  repaired: 'tools',
+  replaced: 'refresh',
+  judged: 'bench',
+};
+
+/** A component's life on one axis of time: marks above it, who and what under it. */
+@Component({
+  selector: 'vw-life-line',
+  imports: [Icon, RouterLink, TimeInZonePipe],
+  templateUrl: './life-line.html',
+  styleUrl: './life-line.scss',
+  changeDetection: ChangeDetectionStrategy.OnPush,
+})
+export class LifeLine {
+  private readonly locale = inject(LOCALE_ID);
+
+  /** Whose life this is, for screen readers. */
+  readonly label = input.required<string>();
+  readonly entries = input.required<readonly LifeEntry[]>();
+  /** Ends of the axis, epoch milliseconds. */
+  readonly from = input.required<number>();
+  readonly to = input.required<number>();
+  /** Zone of the store, in which the dates are read. */
+  readonly zone = input.required<string>();
+
+  protected readonly chosen = signal<string | null>(null);
+  protected readonly icons = ICONS;
+  protected readonly word = lifeWord;
+  protected readonly placed = computed(() => layOutMarks(this.entries(), this.from(), this.to()));
+  protected readonly newestFirst = computed(() => [...this.entries()].sort((a, b) => b.at - a.at));
+  protected readonly ticks = computed(() => {
+    const [from, to] = [this.from(), this.to()];
+    const month = new Intl.DateTimeFormat(this.locale, { month: 'short', timeZone: 'UTC' });
+    return axisTicks(from, to).map((tick) => ({
+      ...tick,
+      percent: ((tick.at - from) / Math.max(1, to - from)) * 100,
+      label: tick.year
+        ? String(new Date(tick.at).getUTCFullYear())
+        : month.format(new Date(tick.at)),
+    }));
+  });
+
+  protected choose(id: string): void {
+    this.chosen.update((chosen) => (chosen === id ? null : id));
+  }
+}
