@@ -1,14 +1,18 @@
-// Runs before `npm start` and `npm test` in a clone that may have no packages yet, so it uses Node alone.
-import { spawnSync } from 'node:child_process';
-import { createHash } from 'node:crypto';
-import { existsSync, mkdirSync, readFileSync, writeFileSync } from 'node:fs';
+// Runs before `npm start` and `npm test`, in a clone that may have no packages yet, so it uses Node
+// alone. Installs what the machine lacks, and does nothing in a tenth of a second when all is there.
+import { Failure } from '../db/cluster-failure.mjs';
+import { prepareChromium } from './prepare/chromium.mjs';
+import { checkGround } from './prepare/ground.mjs';
+import { preparePackages } from './prepare/packages.mjs';
+import { preparePostgres } from './prepare/postgres.mjs';
 
-const stamp = '.local/packages.sha256';
-const wanted = createHash('sha256').update(readFileSync('package-lock.json')).digest('hex');
-const current = existsSync('node_modules') && existsSync(stamp) ? readFileSync(stamp, 'utf8') : '';
-if (current !== wanted) {
-  const { status } = spawnSync('npm', ['ci'], { stdio: 'inherit' });
-  if (status !== 0) process.exit(status ?? 1);
-  mkdirSync('.local', { recursive: true });
-  writeFileSync(stamp, wanted);
+const purpose = process.argv[2] ?? 'start';
+try {
+  checkGround();
+  preparePackages();
+  preparePostgres();
+  if (purpose === 'test') prepareChromium();
+} catch (error) {
+  process.stderr.write(`${error instanceof Failure ? error.message : error.stack}\n`);
+  process.exit(1);
 }
