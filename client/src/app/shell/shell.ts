@@ -8,6 +8,7 @@ import { Session } from '../session/session';
 import { Brand } from '../ui/brand/brand';
 import { AccountMenu } from './account-menu';
 import { BottomBar } from './bottom-bar';
+import { KeptScroll } from './kept-scroll';
 import { MoreMenu } from './more-menu';
 import { navigation } from './navigation';
 import { PageTitle } from './page-title';
@@ -24,6 +25,7 @@ const ROOM = [
 @Component({
   selector: 'vw-shell',
   imports: [AccountMenu, BottomBar, Brand, MoreMenu, RouterLink, RouterLinkActive, RouterOutlet],
+  providers: [KeptScroll],
   templateUrl: './shell.html',
   styleUrl: './shell.scss',
   changeDetection: ChangeDetectionStrategy.OnPush,
@@ -51,6 +53,7 @@ export class Shell {
 
   constructor() {
     this.focusOnNewPage();
+    inject(KeptScroll).follow(() => this.main().nativeElement);
   }
 
   protected skipToMain(event: Event): void {

@@ -1,5 +1,4 @@
 import { ChangeDetectionStrategy, Component, computed, inject } from '@angular/core';
-import { DatePipe } from '@angular/common';
 import { MatButton } from '@angular/material/button';
 import { Router } from '@angular/router';
 import { filter, switchMap } from 'rxjs';
@@ -9,20 +8,21 @@ import { Confirm } from '../../ui/confirm-dialog/confirm';
 import { Notices } from '../../ui/notice/notices';
 import { PageError } from '../../ui/page-states/page-error';
 import { PageLoading } from '../../ui/page-states/page-loading';
+import { TimeInZonePipe } from '../../ui/text/time-in-zone-pipe';
 import type { OwnSession } from '../account-api';
 import { AccountApi } from '../account-api';
 
 /** Where the person is signed in, each of which they can end. */
 @Component({
   selector: 'vw-session-list',
-  imports: [DatePipe, MatButton, PageError, PageLoading],
+  imports: [MatButton, PageError, PageLoading, TimeInZonePipe],
   templateUrl: './session-list.html',
   styleUrls: ['./section.scss', './session-list.scss'],
   changeDetection: ChangeDetectionStrategy.OnPush,
 })
 export class SessionList {
   private readonly api = inject(AccountApi);
-  private readonly session = inject(Session);
+  protected readonly session = inject(Session);
   private readonly router = inject(Router);
   private readonly notices = inject(Notices);
   private readonly confirm = inject(Confirm);

@@ -21,7 +21,7 @@ import { ThemeChoice } from '../../session/theme-choice';
       <mat-radio-button value="dark" i18n="@@sign-in.theme-dark">Dark</mat-radio-button>
     </mat-radio-group>
   `,
-  styleUrl: './section.scss',
+  styleUrls: ['./section.scss', './theme-field.scss'],
   changeDetection: ChangeDetectionStrategy.OnPush,
 })
 export class ThemeField {

@@ -56,12 +56,16 @@ export class LifeLine {
   protected readonly icons = ICONS;
   protected readonly word = lifeWord;
   protected readonly placed = computed(() => layOutMarks(this.entries(), this.from(), this.to()));
+  protected readonly height = computed(
+    () => 62 + 30 * Math.max(0, ...this.placed().map((item) => item.lane)),
+  );
   protected readonly newestFirst = computed(() => [...this.entries()].sort((a, b) => b.at - a.at));
   protected readonly ticks = computed(() => {
     const [from, to] = [this.from(), this.to()];
     const month = new Intl.DateTimeFormat(this.locale, { month: 'short', timeZone: 'UTC' });
     return axisTicks(from, to).map((tick) => ({
       ...tick,
+      minor: new Date(tick.at).getUTCMonth() % 3 !== 0,
       percent: ((tick.at - from) / Math.max(1, to - from)) * 100,
       label: tick.year
         ? String(new Date(tick.at).getUTCFullYear())
