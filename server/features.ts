@@ -1,3 +1,6 @@
+import { findingRoutes } from './findings/finding-routes';
+import { inspectionRoutes } from './inspections/inspection-routes';
+import { shiftCheckRoutes } from './shift-checks/shift-check-routes';
 import { proceduresRoutes } from './procedures/procedures-routes';
 import type { Routes } from './http/routes';
 import { signInRoutes } from './sign-in/sign-in-routes';
@@ -6,4 +9,7 @@ import { signInRoutes } from './sign-in/sign-in-routes';
 export function registerFeatures(routes: Routes): void {
   signInRoutes(routes);
   proceduresRoutes(routes);
+  inspectionRoutes(routes);
+  shiftCheckRoutes(routes);
+  findingRoutes(routes);
 }

@@ -1,6 +1,19 @@
 /** What was decided about a task; `none` while nobody has said anything. */
 export type TaskOutcome = 'none' | 'done' | 'excused' | 'covered';
 
+export const taskStates = [
+  'planned',
+  'open',
+  'due-soon',
+  'overdue',
+  'done',
+  'done-late',
+  'missed',
+  'excused',
+  'covered',
+] as const;
+
+/** The words a person reads; see {@link taskState}. */
 /** The words a person reads; see {@link taskState}. */
 export type TaskState =
   | 'planned'

@@ -1,0 +1,188 @@
+import { randomUUID } from 'node:crypto';
+import { type Fleet, insert, makeFleet, makePerson } from '@test/factories/organisation-factory';
+import { makeWork } from '@test/factories/task-factory';
+import { type Browser, type TestApp, testApp } from '@test/support/test-app';
+
+describe('doing a task', () => {
+  let app: TestApp;
+  let fleet: Fleet;
+  let work: Awaited<ReturnType<typeof makeWork>>;
+  let technician: Browser;
+  let colleague: Browser;
+  let taskId: string;
+  let occurrence = 10;
+
+  beforeAll(async () => {
+    app = await testApp();
+    app.setNow('2026-06-10T15:00:00Z');
+    fleet = await makeFleet(app.db);
+    work = await makeWork(app.db, fleet);
+    await insert(app.db, 'components', {
+      organisation_id: fleet.organisationId,
+      unit_id: fleet.unitId,
+      kind: 'motor',
+      nameplate: { volts: 115, amps: 9.8 },
+      installed_on: '2025-01-01',
+    });
+    const region = { kind: 'region', id: fleet.regionId } as const;
+    const signIn = async (role: 'technician' | 'store-manager' | 'regional-facility-manager') => {
+      const person = await makePerson(app.db, fleet.organisationId, role, region);
+      return app.browser().signIn(person.email);
+    };
+    technician = await signIn('technician');
+    colleague = await signIn('technician');
+  });
+  afterAll(() => app.close());
+
+  beforeEach(async () => {
+    occurrence += 1;
+    taskId = await work.makeTask({ occurs_local: `2026-06-10T09:00:${occurrence}` });
+    app.setNow('2026-06-10T15:00:00Z');
+  });
+
+  const inspection = (readings?: object[], more: object = {}) => ({
+    id: randomUUID(),
+    procedureVersionId: work.procedureVersionId,
+    startedAt: null,
+    note: '',
+    readings: readings ?? [
+      { step: 'vents', kind: 'check', ok: true },
+      { step: 'amps', kind: 'number', value: 9.8 },
+    ],
+    ...more,
+  });
+
+  it('shows the procedure with the limit of the motor that is in the unit', async () => {
+    const { body } = await technician.get(`/tasks/${taskId}/sheet`).expect(200);
+    expect(body.task.state).toBe('due-soon');
+    // NEC 430.6(A): the nameplate, not the table, is what a running motor is held against.
+    expect(body.limits.amps).toEqual({ low: null, high: 9.8 });
+    expect(body.mayClose).toBe(true);
+  });
+
+  it('closes a task within limits without a finding', async () => {
+    const { body } = await technician.put(`/tasks/${taskId}/inspection`, inspection()).expect(200);
+    expect(body).toEqual({ state: 'done', findings: 0 });
+    const sheet = await technician.get(`/tasks/${taskId}/sheet`).expect(200);
+    expect(sheet.body.inspection.readings).toHaveLength(2);
+    expect(sheet.body.mayClose).toBe(false);
+  });
+
+  it('makes a finding on the component for each reading out of limit', async () => {
+    const { body } = await technician
+      .put(
+        `/tasks/${taskId}/inspection`,
+        inspection([
+          { step: 'vents', kind: 'check', ok: true },
+          { step: 'amps', kind: 'number', value: 9.9 },
+          { step: 'seal', kind: 'choice', choice: 'drips' },
+        ]),
+      )
+      .expect(200);
+    expect(body.findings).toBe(2);
+    const [rows] = await app.db.owner.query(
+      `SELECT cause, severity, component_id IS NOT NULL AS known FROM findings
+       WHERE inspection_id IN (SELECT id FROM inspections WHERE task_id = '${taskId}') ORDER BY cause`,
+    );
+    expect(rows).toEqual([
+      { cause: 'bearing', severity: 'plan', known: true },
+      { cause: 'worn-seal', severity: 'stop', known: false },
+    ]);
+  });
+
+  it('names every step that lacks an answer or does not fit', async () => {
+    const { body } = await technician
+      .put(
+        `/tasks/${taskId}/inspection`,
+        inspection([
+          { step: 'amps', kind: 'text', text: 'nine' },
+          { step: 'seal', kind: 'choice', choice: 'sprays' },
+        ]),
+      )
+      .expect(422);
+    expect(body.errors.map((it: { field: string }) => it.field)).toEqual([
+      'readings.vents',
+      'readings.amps',
+      'readings.seal',
+    ]);
+  });
+
+  it('takes the same inspection twice as one, and refuses a second one', async () => {
+    const first = inspection();
+    await technician.put(`/tasks/${taskId}/inspection`, first).expect(200);
+    await technician.put(`/tasks/${taskId}/inspection`, first).expect(200);
+    await colleague.put(`/tasks/${taskId}/inspection`, inspection()).expect(409);
+  });
+
+  it('is late after the window and impossible before it or once it has lapsed', async () => {
+    app.setNow('2026-06-16T05:00:00Z');
+    await technician.put(`/tasks/${taskId}/inspection`, inspection()).expect(409);
+    app.setNow('2026-06-08T04:59:59Z');
+    await technician.put(`/tasks/${taskId}/inspection`, inspection()).expect(409);
+    app.setNow('2026-06-13T05:00:00Z');
+    const { body } = await technician.put(`/tasks/${taskId}/inspection`, inspection()).expect(200);
+    expect(body.state).toBe('done-late');
+    const [stale] = await app.db.owner.query(`SELECT day FROM stale_days`);
+    expect(stale).toEqual([{ day: '2026-06-12' }]);
+  });
+
+  it('is given back by an undo, which keeps the inspection on record', async () => {
+    await technician.put(`/tasks/${taskId}/inspection`, inspection()).expect(200);
+    await colleague.delete(`/tasks/${taskId}/inspection`).expect(403);
+    const { body } = await technician.delete(`/tasks/${taskId}/inspection`).expect(200);
+    expect(body.state).toBe('due-soon');
+    const [kept] = await app.db.owner.query(
+      `SELECT undone_at IS NOT NULL AS undone FROM inspections WHERE task_id = '${taskId}'`,
+    );
+    expect(kept).toEqual([{ undone: true }]);
+  });
+
+  it('leaves another technician’s task alone', async () => {
+    const [[me]] = (await app.db.owner.query(
+      `SELECT id FROM people WHERE id <> (SELECT min(id::text)::uuid FROM people) LIMIT 1`,
+    )) as unknown as [[{ id: string }]];
+    await app.db.owner.query(`UPDATE tasks SET assigned_to = '${me.id}' WHERE id = '${taskId}'`);
+    const replies = await Promise.all(
+      [technician, colleague].map((it) => it.put(`/tasks/${taskId}/inspection`, inspection())),
+    );
+    expect(replies.map(({ status }) => status).sort()).toEqual([200, 403]);
+  });
+
+  it('keeps a task open with the reason it could not be done', async () => {
+    await technician
+      .post(`/tasks/${taskId}/could-not`, { reason: 'no-access', note: 'Line blocked' })
+      .expect(204);
+    const { body } = await technician.get(`/tasks/${taskId}/sheet`).expect(200);
+    expect(body.task.couldNot).toBe('no-access: Line blocked');
+    expect(body.task.state).toBe('due-soon');
+  });
+
+  it('does not exist for another organisation', async () => {
+    const other = await makeFleet(app.db);
+    const person = await makePerson(app.db, other.organisationId, 'technician');
+    const stranger = await app.browser().signIn(person.email);
+    await stranger.get(`/tasks/${taskId}/sheet`).expect(404);
+  });
+
+  it('lets the store acknowledge its own checks, never a technician’s task', async () => {
+    const shift = await makeWork(app.db, fleet, 'store');
+    const checkId = await shift.makeTask();
+    const store = { kind: 'store', id: fleet.storeId } as const;
+    const person = await makePerson(app.db, fleet.organisationId, 'store-manager', store);
+    const manager = await app.browser().signIn(person.email);
+    const { body } = await manager.get('/shift').expect(200);
+    expect(body.waiting.map((it: { task: { id: string } }) => it.task.id)).toEqual([checkId]);
+    const checks = (id: string, of: string) => ({
+      checks: [{ taskId: id, inspection: inspection(undefined, { procedureVersionId: of }) }],
+    });
+    await manager
+      .post('/shift/acknowledgements', checks(taskId, work.procedureVersionId))
+      .expect(403);
+    await manager
+      .post('/shift/acknowledgements', checks(checkId, shift.procedureVersionId))
+      .expect(200);
+    const after = await manager.get('/shift').expect(200);
+    expect(after.body.waiting).toEqual([]);
+    expect(after.body.done).toHaveLength(1);
+  });
+});
