@@ -14,17 +14,7 @@ export const taskStates = [
 ] as const;
 
 /** The words a person reads; see {@link taskState}. */
-/** The words a person reads; see {@link taskState}. */
-export type TaskState =
-  | 'planned'
-  | 'open'
-  | 'due-soon'
-  | 'overdue'
-  | 'done'
-  | 'done-late'
-  | 'missed'
-  | 'excused'
-  | 'covered';
+export type TaskState = (typeof taskStates)[number];
 
 /** The moments of one task, in epoch milliseconds, in this order (equal ones allowed). */
 export interface TaskTimes {
