@@ -9,7 +9,10 @@ import {
 } from './local-date-time';
 import { GREGORIAN_CYCLE, zoneOffsets } from './zone-offsets';
 
-/** Where one zone's rules can be projected no further they repeat with the calendar. */
+/** Before it no zone of the tz database ever changed; its first offset holds back for ever. */
+const FIRST_TABLED_YEAR = 1800;
+
+/** From here on a zone's rules repeat as the calendar does, every 400 years. */
 const LAST_TABLED_YEAR = 2400;
 
 /**
@@ -28,7 +31,7 @@ export function instantOf(local: LocalDateTime, tzid: string): number {
 export function instantOfWall(wall: WallSeconds, tzid: string): number {
   const cycles = cyclesBeyond(wall);
   const shifted = wall - cycles * GREGORIAN_CYCLE;
-  const year = civilFromDayNumber(Math.floor(shifted / SECONDS_PER_DAY)).year;
+  const year = tabledYear(shifted);
   // No zone is a whole day from UTC, so the instant lies within a day of the wall time read as UTC.
   const { starts, offsets } = zoneOffsets(tzid, year - 1, year + 1);
   let i = segmentAt(starts, shifted - SECONDS_PER_DAY);
@@ -43,7 +46,12 @@ export function instantOfWall(wall: WallSeconds, tzid: string): number {
 
 /** What clocks in `tzid` show at an instant (epoch milliseconds; parts of a second fall away). */
 export function localAt(instant: number, tzid: string): LocalDateTime {
-  return fromWallSeconds(Math.floor(instant / 1000) + offsetAt(instant, tzid));
+  return fromWallSeconds(wallAt(instant, tzid));
+}
+
+/** {@link localAt} as a number, for any year. */
+export function wallAt(instant: number, tzid: string): WallSeconds {
+  return Math.floor(instant / 1000) + offsetAt(instant, tzid);
 }
 
 /** The calendar date in `tzid` at an instant (epoch milliseconds). */
@@ -55,7 +63,7 @@ export function dateAt(instant: number, tzid: string): CalendarDate {
 export function offsetAt(instant: number, tzid: string): number {
   const second = Math.floor(instant / 1000);
   const shifted = second - cyclesBeyond(second) * GREGORIAN_CYCLE;
-  const year = civilFromDayNumber(Math.floor(shifted / SECONDS_PER_DAY)).year;
+  const year = tabledYear(shifted);
   const { starts, offsets } = zoneOffsets(tzid, year, year);
   return offset(offsets, segmentAt(starts, shifted));
 }
@@ -64,6 +72,11 @@ export function offsetAt(instant: number, tzid: string): number {
 function cyclesBeyond(seconds: number): number {
   const year = 1970 + seconds / (365.2425 * SECONDS_PER_DAY);
   return year < LAST_TABLED_YEAR ? 0 : Math.ceil((year - LAST_TABLED_YEAR) / 400);
+}
+
+function tabledYear(seconds: number): number {
+  const { year } = civilFromDayNumber(Math.floor(seconds / SECONDS_PER_DAY));
+  return Math.max(FIRST_TABLED_YEAR, year);
 }
 
 function offset(offsets: readonly number[], index: number): number {

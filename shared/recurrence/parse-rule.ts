@@ -1,187 +1,224 @@
-import { dayNumber, fromDayNumber } from '../calendar/calendar-date';
+import { type CalendarDate, isCalendarDate, type Weekday } from '../calendar/calendar-date';
+import { readBasicDateTime, toWallSeconds } from '../calendar/local-date-time';
 import {
-  type ByDay,
+  FREQUENCIES,
   type Frequency,
+  type NumberPart,
   type Rule,
-  type RuleProblem,
+  type RuleDay,
   type Until,
-  frequencies,
-  weekdays,
+  WEEKDAY_NAMES,
 } from './rule';
+import { illegalCombinations, type StartForm } from './rule-legality';
+import { type RuleProblem, ruleProblem } from './rule-problem';
 
-export type ParsedRule =
-  | { readonly rule: Rule; readonly problems: readonly [] }
-  | { readonly rule: null; readonly problems: readonly RuleProblem[] };
-
-/** Range of each list of numbers, and whether it may count from the end. RFC 5545, 3.3.10. */
-const lists = {
-  // 60 is a leap second; wall clocks here have none, so it is read as 59.
-  BYSECOND: [0, 60, false],
-  BYMINUTE: [0, 59, false],
-  BYHOUR: [0, 23, false],
-  BYMONTHDAY: [1, 31, true],
-  BYYEARDAY: [1, 366, true],
-  BYWEEKNO: [1, 53, true],
-  BYMONTH: [1, 12, false],
-  BYSETPOS: [1, 366, true],
-} as const;
-
-const known = [...Object.keys(lists), 'FREQ', 'INTERVAL', 'COUNT', 'UNTIL', 'WKST', 'BYDAY'];
-
-/**
- * Reads the text of an RRULE value (with or without the name `RRULE:`) by RFC 5545, 3.3.10.
- * Never throws: everything that is wrong is told at once, each with the part at fault.
- */
-export function parseRule(text: string): ParsedRule {
-  const problems: RuleProblem[] = [];
-  const fail = (part: string, reason: RuleProblem['reason'], message: string) => {
-    problems.push({ part, reason, message });
-    return undefined;
-  };
-  const parts = splitParts(text, fail);
-
-  const list = (part: keyof typeof lists): number[] => {
-    const value = parts.get(part);
-    if (value === undefined) return [];
-    const [low, high, fromEnd] = lists[part];
-    const numbers = value.split(',').map((item) => {
-      const number = /^[+-]?\d{1,3}$/.test(item) ? Number(item) : NaN;
-      if (Number.isNaN(number)) {
-        return fail(part, 'unreadable', `${part}: “${item}” is not a whole number.`);
-      }
-      const size = fromEnd ? Math.abs(number) : number;
-      if (size < low || size > high) {
-        const range = fromEnd ? `${low} to ${high} or -${high} to -${low}` : `${low} to ${high}`;
-        return fail(part, 'out-of-range', `${part}: ${number} is not in the range ${range}.`);
-      }
-      return part === 'BYSECOND' ? Math.min(number, 59) : number;
-    });
-    const read = numbers.filter((it): it is number => it !== undefined);
-    return [...new Set(read)].sort((a, b) => a - b);
-  };
-  const positive = (part: 'INTERVAL' | 'COUNT'): number | undefined => {
-    const value = parts.get(part);
-    if (value === undefined) return undefined;
-    if (!/^\d{1,9}$/.test(value))
-      return fail(part, 'unreadable', `${part} must be a whole number.`);
-    return Number(value) > 0
-      ? Number(value)
-      : fail(part, 'out-of-range', `${part} must be at least 1.`);
-  };
-
-  const frequency = readFrequency(parts.get('FREQ'), fail);
-  const weekStart = weekdays.indexOf((parts.get('WKST') ?? 'MO') as 'MO');
-  if (weekStart < 0) fail('WKST', 'unreadable', 'WKST must be one of MO, TU, WE, TH, FR, SA, SU.');
-  const rule: Rule = {
-    frequency: frequency ?? 'DAILY',
-    interval: positive('INTERVAL') ?? 1,
-    count: positive('COUNT') ?? null,
-    until: readUntil(parts.get('UNTIL'), fail) ?? null,
-    weekStart,
-    bySecond: list('BYSECOND'),
-    byMinute: list('BYMINUTE'),
-    byHour: list('BYHOUR'),
-    byDay: readByDay(parts.get('BYDAY'), fail),
-    byMonthDay: list('BYMONTHDAY'),
-    byYearDay: list('BYYEARDAY'),
-    byWeekNo: list('BYWEEKNO'),
-    byMonth: list('BYMONTH'),
-    bySetPos: list('BYSETPOS'),
-  };
-  if (frequency) checkTogether(rule, parts, fail);
-  return problems.length > 0 ? { rule: null, problems } : { rule, problems: [] };
+interface NumberSpec {
+  readonly field: NumberPart;
+  /** Largest absolute value. */
+  readonly most: number;
+  readonly least: number;
+  readonly negative: boolean;
 }
 
-type Fail = (part: string, reason: RuleProblem['reason'], message: string) => undefined;
+// The ranges of RFC 5545, 3.3.10.
+const NUMBER_PARTS: Readonly<Record<string, NumberSpec>> = {
+  BYSECOND: { field: 'bySecond', least: 0, most: 60, negative: false },
+  BYMINUTE: { field: 'byMinute', least: 0, most: 59, negative: false },
+  BYHOUR: { field: 'byHour', least: 0, most: 23, negative: false },
+  BYMONTHDAY: { field: 'byMonthDay', least: 1, most: 31, negative: true },
+  BYYEARDAY: { field: 'byYearDay', least: 1, most: 366, negative: true },
+  BYWEEKNO: { field: 'byWeekNo', least: 1, most: 53, negative: true },
+  BYMONTH: { field: 'byMonth', least: 1, most: 12, negative: false },
+  BYSETPOS: { field: 'bySetPos', least: 1, most: 366, negative: true },
+};
 
-function splitParts(text: string, fail: Fail): Map<string, string> {
-  const parts = new Map<string, string>();
+const MOST_INTERVAL = 1_000_000_000;
+
+type Draft = { -readonly [K in keyof Rule]: Rule[K] };
+
+/**
+ * Reads the text of a recurrence rule (RFC 5545, 3.3.10), with or without `RRULE:` before it, in
+ * upper or lower case. Answers the rule, or every problem at once.
+ *
+ * With `start`, the form of the start is held against the rule as the RFC demands: the form of UNTIL,
+ * and no times of day where the start is a date.
+ */
+export function parseRule(text: string, start?: StartForm): Rule | RuleProblem[] {
+  const problems: RuleProblem[] = [];
+  const draft: Draft = {
+    frequency: 'DAILY',
+    interval: 1,
+    count: null,
+    until: null,
+    bySecond: [],
+    byMinute: [],
+    byHour: [],
+    byDay: [],
+    byMonthDay: [],
+    byYearDay: [],
+    byWeekNo: [],
+    byMonth: [],
+    bySetPos: [],
+    weekStart: 0,
+  };
   const body = text
     .trim()
     .toUpperCase()
     .replace(/^RRULE:/, '');
+  if (body === '') return [ruleProblem('RRULE', 'empty')];
+
+  const seen: string[] = [];
   for (const piece of body.split(';')) {
-    const [name = '', value, more] = piece.split('=');
-    if (value === undefined || value === '' || more !== undefined) {
-      fail(name || 'RRULE', 'unreadable', `“${piece}” is not of the form NAME=VALUE.`);
-    } else if (!known.includes(name)) {
-      fail(name, 'unknown-part', `${name} is not a part of a recurrence rule.`);
-    } else if (parts.has(name)) {
-      fail(name, 'twice', `${name} stands twice.`);
-    } else {
-      parts.set(name, value);
-    }
+    const equals = piece.indexOf('=');
+    const part = piece.slice(0, equals);
+    const value = piece.slice(equals + 1);
+    if (equals < 1) problems.push(ruleProblem('RRULE', 'malformed-part', { text: piece }));
+    else if (seen.includes(part)) problems.push(ruleProblem(part, 'repeated-part'));
+    else if (value === '') problems.push(ruleProblem(part, 'empty-value'));
+    else readPart(draft, part, value, problems);
+    if (equals >= 1) seen.push(part);
   }
-  return parts;
+  if (!seen.includes('FREQ')) problems.push(ruleProblem('FREQ', 'missing-frequency'));
+  else if (!problems.some(({ code }) => code === 'unknown-frequency')) {
+    problems.push(...illegalCombinations(draft, seen, start));
+  }
+  return problems.length > 0 ? problems : draft;
 }
 
-function readFrequency(value: string | undefined, fail: Fail): Frequency | undefined {
-  if (value === undefined) return fail('FREQ', 'missing', 'FREQ is missing.');
-  const frequency = frequencies.find((it) => it === value);
-  return frequency ?? fail('FREQ', 'unreadable', `FREQ must be one of ${frequencies.join(', ')}.`);
+/** Whether {@link parseRule} answered problems. */
+export function isProblems(parsed: Rule | RuleProblem[]): parsed is RuleProblem[] {
+  return Array.isArray(parsed);
 }
 
-function readByDay(value: string | undefined, fail: Fail): ByDay[] {
-  if (value === undefined) return [];
-  const days = value.split(',').map((item): ByDay | undefined => {
-    const [, ordinal = '', name] = /^([+-]?\d{1,2})?(MO|TU|WE|TH|FR|SA|SU)$/.exec(item) ?? [];
-    if (!name)
-      return fail('BYDAY', 'unreadable', `BYDAY: “${item}” is not a weekday like MO or -1FR.`);
-    if (ordinal !== '' && (Number(ordinal) === 0 || Math.abs(Number(ordinal)) > 53)) {
-      return fail(
-        'BYDAY',
-        'out-of-range',
-        `BYDAY: ${ordinal} is not in the range 1 to 53 or -53 to -1.`,
+/**
+ * Reads a rule that is known to be good, such as one that was checked when it was saved.
+ * @throws RangeError with all problems in words.
+ */
+export function readRule(text: string): Rule {
+  const parsed = parseRule(text);
+  if (isProblems(parsed)) throw new RangeError(parsed.map(({ message }) => message).join(' '));
+  return parsed;
+}
+
+function readPart(draft: Draft, part: string, value: string, problems: RuleProblem[]): void {
+  const spec = NUMBER_PARTS[part];
+  if (spec) {
+    draft[spec.field] = readNumbers(part, spec, value, problems);
+    return;
+  }
+  switch (part) {
+    case 'FREQ':
+      if (FREQUENCIES.includes(value as Frequency)) draft.frequency = value as Frequency;
+      else problems.push(ruleProblem('FREQ', 'unknown-frequency', { value }));
+      break;
+    case 'INTERVAL':
+      draft.interval = readPositive(part, value, problems);
+      break;
+    case 'COUNT':
+      draft.count = readPositive(part, value, problems);
+      break;
+    case 'UNTIL':
+      draft.until = readUntil(value);
+      if (!draft.until) problems.push(ruleProblem('UNTIL', 'not-a-date', { value }));
+      break;
+    case 'WKST': {
+      const weekday = weekdayNamed(value);
+      if (weekday === null) problems.push(ruleProblem('WKST', 'not-a-weekday', { value }));
+      else draft.weekStart = weekday;
+      break;
+    }
+    case 'BYDAY':
+      draft.byDay = readDays(value, problems);
+      break;
+    default:
+      problems.push(ruleProblem(part, 'unknown-part'));
+  }
+}
+
+function readPositive(part: string, value: string, problems: RuleProblem[]): number {
+  if (!/^\d+$/.test(value)) {
+    problems.push(ruleProblem(part, 'not-a-number', { value }));
+    return 1;
+  }
+  const number = Number(value);
+  if (number >= 1 && number <= MOST_INTERVAL) return number;
+  problems.push(ruleProblem(part, 'out-of-range', { value, range: `1 to ${MOST_INTERVAL}` }));
+  return 1;
+}
+
+function readNumbers(
+  part: string,
+  spec: NumberSpec,
+  value: string,
+  problems: RuleProblem[],
+): number[] {
+  const numbers: number[] = [];
+  for (const item of value.split(',')) {
+    const number = /^[+-]?\d{1,3}$/.test(item) ? Number(item) : NaN;
+    const size = Math.abs(number);
+    const signed = !spec.negative && /^[+-]/.test(item);
+    if (Number.isNaN(number) || signed) {
+      const digits = /^[+-]?\d+$/.test(item);
+      problems.push(
+        digits
+          ? ruleProblem(part, 'out-of-range', { value: item, range: rangeOf(spec) })
+          : ruleProblem(part, 'not-a-number', { value: item }),
       );
-    }
-    return { weekday: weekdays.indexOf(name as 'MO'), ordinal: Number(ordinal) };
-  });
-  return days.filter((it): it is ByDay => it !== undefined);
+    } else if (size < spec.least || size > spec.most) {
+      problems.push(ruleProblem(part, 'out-of-range', { value: item, range: rangeOf(spec) }));
+    } else if (!numbers.includes(number)) numbers.push(number);
+  }
+  return numbers.length > 1 ? numbers.sort(fromTheBeginningFirst) : numbers;
 }
 
-function readUntil(value: string | undefined, fail: Fail): Until | undefined {
-  if (value === undefined) return undefined;
-  const read = /^(\d{4})(\d\d)(\d\d)(?:T(\d\d)(\d\d)(\d\d)(Z?))?$/.exec(value);
-  if (read) {
-    const [, year, month, date, hour, minute, second, zulu] = read;
-    const day = dayNumber(Number(year), Number(month), Number(date));
-    const real = fromDayNumber(day) === `${year}-${month}-${date}`;
-    if (real && hour === undefined) return { kind: 'date', day };
-    const [h, m, s] = [Number(hour), Number(minute), Number(second)];
-    if (real && h < 24 && m < 60 && s < 61) {
-      const seconds = day * 86_400 + h * 3600 + m * 60 + Math.min(s, 59);
-      return { kind: zulu === 'Z' ? 'instant' : 'local', seconds };
-    }
-  }
-  return fail('UNTIL', 'unreadable', `UNTIL: “${value}” is not a date like 20261231T235959Z.`);
+function rangeOf({ least, most, negative }: NumberSpec): string {
+  return negative ? `${least} to ${most} and -${most} to -${least}` : `${least} to ${most}`;
 }
 
-/** What RFC 5545, 3.3.10 forbids in company. */
-function checkTogether(rule: Rule, parts: ReadonlyMap<string, string>, fail: Fail): void {
-  const { frequency } = rule;
-  const notWith = (part: string) =>
-    fail(part, 'not-with-frequency', `${part} cannot stand in a rule with FREQ=${frequency}.`);
-  if (parts.has('COUNT') && parts.has('UNTIL')) {
-    fail('COUNT', 'count-with-until', 'COUNT and UNTIL cannot stand in the same rule.');
-  }
-  if (parts.has('BYWEEKNO') && frequency !== 'YEARLY') notWith('BYWEEKNO');
-  if (parts.has('BYYEARDAY') && ['DAILY', 'WEEKLY', 'MONTHLY'].includes(frequency)) {
-    notWith('BYYEARDAY');
-  }
-  if (parts.has('BYMONTHDAY') && frequency === 'WEEKLY') notWith('BYMONTHDAY');
-  if (rule.byDay.some(({ ordinal }) => ordinal !== 0)) {
-    if (frequency !== 'MONTHLY' && frequency !== 'YEARLY') {
-      fail(
-        'BYDAY',
-        'not-with-frequency',
-        `BYDAY takes numbers like 2MO only in MONTHLY and YEARLY rules.`,
+function fromTheBeginningFirst(a: number, b: number): number {
+  return a < 0 === b < 0 ? a - b : b - a;
+}
+
+function readDays(value: string, problems: RuleProblem[]): RuleDay[] {
+  const days: RuleDay[] = [];
+  for (const item of value.split(',')) {
+    const weekday = weekdayNamed(item.slice(-2));
+    const number = item.slice(0, -2);
+    if (weekday === null || !/^(?:[+-]?\d{1,2})?$/.test(number)) {
+      problems.push(ruleProblem('BYDAY', 'not-a-weekday', { value: item }));
+      continue;
+    }
+    const ordinal = Number(number);
+    if (number !== '' && (ordinal === 0 || Math.abs(ordinal) > 53)) {
+      problems.push(
+        ruleProblem('BYDAY', 'out-of-range', { value: item, range: '1 to 53 and -53 to -1' }),
       );
-    } else if (parts.has('BYWEEKNO')) {
-      fail('BYDAY', 'not-with-frequency', 'BYDAY takes no numbers like 2MO beside BYWEEKNO.');
+    } else if (!days.some((day) => day.weekday === weekday && day.ordinal === ordinal)) {
+      days.push({ weekday, ordinal });
     }
   }
-  const others = [...parts.keys()].some((part) => part.startsWith('BY') && part !== 'BYSETPOS');
-  if (parts.has('BYSETPOS') && !others) {
-    fail('BYSETPOS', 'needs-another-part', 'BYSETPOS needs another BY part beside it.');
+  return days.length > 1 ? days.sort(byOrdinalThenWeekday) : days;
+}
+
+function byOrdinalThenWeekday(a: RuleDay, b: RuleDay): number {
+  return a.ordinal === b.ordinal
+    ? a.weekday - b.weekday
+    : fromTheBeginningFirst(a.ordinal, b.ordinal);
+}
+
+function weekdayNamed(name: string): Weekday | null {
+  const index = WEEKDAY_NAMES.indexOf(name as (typeof WEEKDAY_NAMES)[number]);
+  return index < 0 ? null : (index as Weekday);
+}
+
+function readUntil(value: string): Until | null {
+  if (/^\d{8}$/.test(value)) {
+    const date = `${value.slice(0, 4)}-${value.slice(4, 6)}-${value.slice(6)}` as CalendarDate;
+    return isCalendarDate(date) ? { form: 'date', date } : null;
   }
+  const local = readBasicDateTime(value.endsWith('Z') ? value.slice(0, -1) : value);
+  if (!local) return null;
+  return value.endsWith('Z')
+    ? { form: 'utc', instant: toWallSeconds(local) * 1000 }
+    : { form: 'local', local };
 }

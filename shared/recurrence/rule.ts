@@ -1,5 +1,8 @@
-/** RFC 5545, 3.3.10. */
-export const frequencies = [
+import type { CalendarDate, Weekday } from '../calendar/calendar-date';
+import type { LocalDateTime } from '../calendar/local-date-time';
+
+/** How often the interval of a rule is counted, fastest first (RFC 5545, 3.3.10). */
+export const FREQUENCIES = [
   'SECONDLY',
   'MINUTELY',
   'HOURLY',
@@ -9,58 +12,77 @@ export const frequencies = [
   'YEARLY',
 ] as const;
 
-export type Frequency = (typeof frequencies)[number];
+export type Frequency = (typeof FREQUENCIES)[number];
 
-/** Weekdays as RFC 5545 writes them, from Monday, which is 0 here as in ISO 8601. */
-export const weekdays = ['MO', 'TU', 'WE', 'TH', 'FR', 'SA', 'SU'] as const;
+/** RFC 5545's names of the weekdays, in the order of {@link Weekday}. */
+export const WEEKDAY_NAMES = ['MO', 'TU', 'WE', 'TH', 'FR', 'SA', 'SU'] as const;
 
-export interface ByDay {
-  /** 0 Monday to 6 Sunday. */
-  readonly weekday: number;
-  /** 2 the second, −1 the last; 0 every one. */
+/** A weekday of BYDAY: every one (ordinal 0), or the nth, from the end when negative. */
+export interface RuleDay {
+  readonly weekday: Weekday;
   readonly ordinal: number;
 }
 
-/** When a rule ends: an instant, a wall-clock time, or a whole day; always inclusive. */
+/** The inclusive end of a rule, in whichever of the three forms it was written. */
 export type Until =
-  | { readonly kind: 'instant'; readonly seconds: number }
-  | { readonly kind: 'local'; readonly seconds: number }
-  | { readonly kind: 'date'; readonly day: number };
+  | { readonly form: 'date'; readonly date: CalendarDate }
+  | { readonly form: 'local'; readonly local: LocalDateTime }
+  /** Epoch milliseconds. */
+  | { readonly form: 'utc'; readonly instant: number };
 
-/** A parsed RRULE. Empty lists mean the part is absent. */
-export interface Rule {
+/** The parts of a rule that hold lists of numbers. */
+export type NumberPart =
+  | 'bySecond'
+  | 'byMinute'
+  | 'byHour'
+  | 'byMonthDay'
+  | 'byYearDay'
+  | 'byWeekNo'
+  | 'byMonth'
+  | 'bySetPos';
+
+/**
+ * One recurrence rule, RFC 5545, 3.3.10. Lists are free of doubles and in canonical order: from the
+ * beginning first, then those that count from the end. An empty list means that the part is absent.
+ */
+export interface Rule extends Readonly<Record<NumberPart, readonly number[]>> {
   readonly frequency: Frequency;
   readonly interval: number;
   readonly count: number | null;
   readonly until: Until | null;
-  /** First day of the week, 0 Monday. */
-  readonly weekStart: number;
-  readonly bySecond: readonly number[];
-  readonly byMinute: readonly number[];
-  readonly byHour: readonly number[];
-  readonly byDay: readonly ByDay[];
-  readonly byMonthDay: readonly number[];
-  readonly byYearDay: readonly number[];
-  readonly byWeekNo: readonly number[];
-  readonly byMonth: readonly number[];
-  readonly bySetPos: readonly number[];
+  readonly byDay: readonly RuleDay[];
+  /** The day on which a week starts; Monday unless WKST says otherwise. */
+  readonly weekStart: Weekday;
 }
 
-/** What is wrong with one part of a rule's text. */
-export interface RuleProblem {
-  /** The part at fault, as written: `BYMONTHDAY`. */
-  readonly part: string;
-  readonly reason:
-    | 'unreadable'
-    | 'unknown-part'
-    | 'twice'
-    | 'missing'
-    | 'out-of-range'
-    | 'not-with-frequency'
-    | 'count-with-until'
-    | 'needs-another-part'
-    | 'never-occurs'
-    | 'too-often';
-  /** A sentence in English that names the part and the reason. */
-  readonly message: string;
+/** A rule without BY-parts and without an end, to be spread into others. */
+export function plainRule(frequency: Frequency, interval = 1): Rule {
+  return {
+    frequency,
+    interval,
+    count: null,
+    until: null,
+    bySecond: [],
+    byMinute: [],
+    byHour: [],
+    byDay: [],
+    byMonthDay: [],
+    byYearDay: [],
+    byWeekNo: [],
+    byMonth: [],
+    bySetPos: [],
+    weekStart: 0,
+  };
+}
+
+/**
+ * A recurrence set (RFC 5545, 3.8.5): a wall-clock start, rules as text, dates added and taken out.
+ * Without rules it holds its start and the added dates. With rules, a start that they do not match is
+ * no occurrence: the standard leaves that case undefined, and a task off its pattern helps nobody.
+ */
+export interface RecurrenceSet {
+  readonly startsLocal: LocalDateTime;
+  readonly rrules: readonly string[];
+  readonly rdates?: readonly LocalDateTime[];
+  readonly exdates?: readonly LocalDateTime[];
 }
