@@ -18,6 +18,10 @@ export const TWO_DIGITS: readonly string[] = Array.from({ length: 100 }, (_, n) 
   String(n).padStart(2, '0'),
 );
 
+/** Days from 1970 to the end of 2069: the dates that a fleet's tasks fall on are written once each. */
+const WRITTEN_DAYS = 36_525;
+const written: CalendarDate[] = [];
+
 const MONTH_LENGTHS = [31, 28, 31, 30, 31, 30, 31, 31, 30, 31, 30, 31];
 
 /**
@@ -77,8 +81,8 @@ export function weekdayOfDayNumber(days: number): Weekday {
 
 /** The date that lies `days` after 1970-01-01; the inverse of {@link toDayNumber}. Years 0–9999. */
 export function fromDayNumber(days: number): CalendarDate {
-  const { year, month, day } = civilFromDayNumber(days);
-  return writeDate(year, month, day);
+  if (days < 0 || days >= WRITTEN_DAYS) return writeDay(days);
+  return (written[days] ??= writeDay(days));
 }
 
 /** Days since 1970-01-01 of a calendar date. */
@@ -145,6 +149,11 @@ export function isoWeek(date: CalendarDate): { readonly year: number; readonly w
   const thursday = day - weekdayOfDayNumber(day) + 3;
   const { year } = civilFromDayNumber(thursday);
   return { year, week: Math.floor((thursday - dayNumber(year, 1, 1)) / 7) + 1 };
+}
+
+function writeDay(days: number): CalendarDate {
+  const { year, month, day } = civilFromDayNumber(days);
+  return writeDate(year, month, day);
 }
 
 function writeDate(year: number, month: number, day: number): CalendarDate {

@@ -7,7 +7,7 @@ import {
   toWallSeconds,
   type WallSeconds,
 } from './local-date-time';
-import { GREGORIAN_CYCLE, zoneOffsets } from './zone-offsets';
+import { GREGORIAN_CYCLE, type ZoneOffsets, zoneOffsets } from './zone-offsets';
 
 /** Before it no zone of the tz database ever changed; its first offset holds back for ever. */
 const FIRST_TABLED_YEAR = 1800;
@@ -29,19 +29,45 @@ export function instantOf(local: LocalDateTime, tzid: string): number {
 
 /** {@link instantOf} for a wall-clock time given as a number. */
 export function instantOfWall(wall: WallSeconds, tzid: string): number {
-  const cycles = cyclesBeyond(wall);
-  const shifted = wall - cycles * GREGORIAN_CYCLE;
-  const year = tabledYear(shifted);
+  const shift = cyclesBeyond(wall) * GREGORIAN_CYCLE;
+  const { starts, offsets, index } = segmentOfWall(wall - shift, tzid);
+  const skipped = isSkipped(wall - shift, starts, offsets, index);
+  return (wall - entry(offsets, skipped ? index - 1 : index)) * 1000;
+}
+
+/**
+ * Whether clocks in `tzid` show a wall-clock time once, never (they skip it) or twice.
+ * @throws RangeError when the machine knows no such zone.
+ */
+export function timesShown(local: LocalDateTime, tzid: string): 'once' | 'never' | 'twice' {
+  const wall = toWallSeconds(local);
+  const shifted = wall - cyclesBeyond(wall) * GREGORIAN_CYCLE;
+  const { starts, offsets, index } = segmentOfWall(shifted, tzid);
+  if (isSkipped(shifted, starts, offsets, index)) return 'never';
+  const next = starts[index + 1];
+  const again = next !== undefined && shifted - entry(offsets, index + 1) >= next;
+  return again ? 'twice' : 'once';
+}
+
+/** The first spell of one offset that has not ended when its clocks show the wall-clock time. */
+function segmentOfWall(wall: WallSeconds, tzid: string): ZoneOffsets & { readonly index: number } {
+  const year = tabledYear(wall);
   // No zone is a whole day from UTC, so the instant lies within a day of the wall time read as UTC.
   const { starts, offsets } = zoneOffsets(tzid, year - 1, year + 1);
-  let i = segmentAt(starts, shifted - SECONDS_PER_DAY);
-  for (; i + 1 < starts.length; i++) {
-    if (shifted - offset(offsets, i) < (starts[i + 1] as number)) break;
+  let index = segmentAt(starts, wall - SECONDS_PER_DAY);
+  while (index + 1 < starts.length && wall - entry(offsets, index) >= entry(starts, index + 1)) {
+    index++;
   }
-  const instant = shifted - offset(offsets, i);
-  const skipped = i > 0 && instant < (starts[i] as number);
-  const settled = skipped ? shifted - offset(offsets, i - 1) : instant;
-  return (settled + cycles * GREGORIAN_CYCLE) * 1000;
+  return { starts, offsets, index };
+}
+
+function isSkipped(
+  wall: WallSeconds,
+  starts: readonly number[],
+  offsets: readonly number[],
+  index: number,
+): boolean {
+  return index > 0 && wall - entry(offsets, index) < entry(starts, index);
 }
 
 /** What clocks in `tzid` show at an instant (epoch milliseconds; parts of a second fall away). */
@@ -65,7 +91,7 @@ export function offsetAt(instant: number, tzid: string): number {
   const shifted = second - cyclesBeyond(second) * GREGORIAN_CYCLE;
   const year = tabledYear(shifted);
   const { starts, offsets } = zoneOffsets(tzid, year, year);
-  return offset(offsets, segmentAt(starts, shifted));
+  return entry(offsets, segmentAt(starts, shifted));
 }
 
 /** How many whole 400-year cycles to go back so that the table stays small. */
@@ -79,8 +105,9 @@ function tabledYear(seconds: number): number {
   return Math.max(FIRST_TABLED_YEAR, year);
 }
 
-function offset(offsets: readonly number[], index: number): number {
-  return offsets[index] as number;
+/** An entry that is known to be there. */
+function entry(entries: readonly number[], index: number): number {
+  return entries[index] as number;
 }
 
 /** The last entry that starts at or before the second, or the first entry of all. */

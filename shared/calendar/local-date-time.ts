@@ -22,6 +22,10 @@ export type WallSeconds = number;
 
 export const SECONDS_PER_DAY = 86_400;
 
+/** The time of day written last: the occurrences of a schedule mostly share theirs. */
+let clockSecond = 0;
+let clock = 'T00:00:00';
+
 /** Wall-clock seconds of a local date-time. */
 export function toWallSeconds(local: LocalDateTime): WallSeconds {
   return (
@@ -36,10 +40,13 @@ export function toWallSeconds(local: LocalDateTime): WallSeconds {
 export function fromWallSeconds(wall: WallSeconds): LocalDateTime {
   const day = Math.floor(wall / SECONDS_PER_DAY);
   const second = wall - day * SECONDS_PER_DAY;
-  const hours = Math.floor(second / 3600);
-  const minutes = Math.floor((second - hours * 3600) / 60);
-  const clock = `${TWO_DIGITS[hours]}:${TWO_DIGITS[minutes]}:${TWO_DIGITS[second % 60]}`;
-  return `${fromDayNumber(day)}T${clock}` as LocalDateTime;
+  if (second !== clockSecond) {
+    const hours = Math.floor(second / 3600);
+    const minutes = Math.floor((second - hours * 3600) / 60);
+    clockSecond = second;
+    clock = `T${TWO_DIGITS[hours]}:${TWO_DIGITS[minutes]}:${TWO_DIGITS[second % 60]}`;
+  }
+  return (fromDayNumber(day) + clock) as LocalDateTime;
 }
 
 /**
