@@ -2,12 +2,16 @@ import { findingRoutes } from './findings/finding-routes';
 import { inspectionRoutes } from './inspections/inspection-routes';
 import { shiftCheckRoutes } from './shift-checks/shift-check-routes';
 import { proceduresRoutes } from './procedures/procedures-routes';
+import { programmesRoutes } from './programmes/programmes-routes';
+import { rulesRoutes } from './programmes/rules-routes';
 import type { Routes } from './http/routes';
 import { signInRoutes } from './sign-in/sign-in-routes';
 
 /** The only file that lists every feature. */
 export function registerFeatures(routes: Routes): void {
   signInRoutes(routes);
+  rulesRoutes(routes);
+  programmesRoutes(routes);
   proceduresRoutes(routes);
   inspectionRoutes(routes);
   shiftCheckRoutes(routes);

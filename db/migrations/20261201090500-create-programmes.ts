@@ -69,6 +69,8 @@ export const createProgrammes = sqlMigration(
       store_id uuid NOT NULL REFERENCES stores,
       unit_id uuid REFERENCES units,
       from_on date NOT NULL,
+      -- The last day for which its enrolment stands, where that is known; null: until further notice.
+      until_on date,
       ended_at timestamptz,
       -- Occurrences before this wall-clock moment, under this revision, are written.
       generated_to timestamp,
