@@ -1,4 +1,4 @@
-import type { FieldProblem } from './problem';
+import type { FieldError } from '@shared/problem';
 import { Problem } from './problem';
 
 /** What the screen says about a problem: what happened, and what one can do. */
@@ -78,7 +78,7 @@ function wordsByStatus(problem: Problem): readonly [string, string] {
 }
 
 /** The words for one refused field; reasons that we do not know keep the server's message. */
-export function fieldWords(error: FieldProblem): string {
+export function fieldWords(error: FieldError): string {
   switch (error.reason) {
     case 'required':
       return $localize`:@@problems.field.required:This is needed.`;

@@ -1,24 +1,5 @@
 import { HttpErrorResponse } from '@angular/common/http';
-
-/** One field that the server refused. */
-export interface FieldProblem {
-  /** Path of the field in the body, parts joined by dots: `steps.2.limit.high`. */
-  readonly field: string;
-  /** Stable reason, for words of our own. */
-  readonly reason: string;
-  /** The server's words. */
-  readonly message: string;
-}
-
-interface ProblemDocument {
-  readonly type?: string;
-  readonly title?: string;
-  readonly status?: number;
-  readonly code?: string;
-  readonly detail?: string;
-  readonly requestId?: string;
-  readonly errors?: readonly FieldProblem[];
-}
+import type { FieldError, ProblemDocument } from '@shared/problem';
 
 /** What went wrong with a request: the problem document of RFC 9457, or its nearest likeness. */
 export class Problem extends Error {
@@ -32,7 +13,7 @@ export class Problem extends Error {
     readonly title = '',
     readonly detail = '',
     readonly requestId = '',
-    readonly errors: readonly FieldProblem[] = [],
+    readonly errors: readonly FieldError[] = [],
   ) {
     super(detail || title || code);
   }
@@ -59,7 +40,7 @@ export function toProblem(failure: unknown): Problem {
   );
 }
 
-function readDocument(body: unknown): ProblemDocument {
+function readDocument(body: unknown): Partial<ProblemDocument> {
   if (typeof body === 'object' && body !== null && !(body instanceof Blob)) return body;
   if (typeof body !== 'string') return {};
   try {

@@ -1,7 +1,7 @@
-import type { RoleName } from './session';
+import type { Role } from '@shared/access/role';
 
 /** The word for a role, as it stands in running text. */
-export function roleWord(role: RoleName): string {
+export function roleWord(role: Role): string {
   switch (role) {
     case 'regional-facility-manager':
       return $localize`:@@session.role.regional-facility-manager:regional facility manager`;

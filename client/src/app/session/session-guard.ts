@@ -1,6 +1,7 @@
 import { inject } from '@angular/core';
 import type { CanActivateFn } from '@angular/router';
 import { RedirectCommand, Router } from '@angular/router';
+import type { Ability } from '@shared/access/ability';
 import { Session } from './session';
 
 /** Lets signed-in people through and sends the others to sign in, to come back after. */
@@ -13,7 +14,7 @@ export const signedIn: CanActivateFn = async (_route, state) => {
 };
 
 /** Lets through who holds one of the abilities; the others see the page that says so. */
-export function can(...abilities: readonly string[]): CanActivateFn {
+export function can(...abilities: readonly Ability[]): CanActivateFn {
   return async () => {
     const router = inject(Router);
     const session = inject(Session);

@@ -9,7 +9,7 @@ import { sessionInterceptor } from './session-interceptor';
 
 const info: SessionInfo = {
   person: {
-    id: 'p-1',
+    id: '6f3b8a34-0000-4000-8000-000000000001',
     name: 'Maya Lindgren',
     email: 'maya@example.com',
     locale: 'en',

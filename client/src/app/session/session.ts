@@ -1,41 +1,14 @@
-import { HttpClient } from '@angular/common/http';
 import { computed, inject, Injectable, signal } from '@angular/core';
+import type { Ability } from '@shared/access/ability';
+import type { ReplyOf } from '@shared/contract/endpoint';
+import type { readSession, signIn, signOut } from '@shared/sign-in/sign-in-contract';
 import { catchError, firstValueFrom, of, tap, throwError } from 'rxjs';
 import type { Observable } from 'rxjs';
-import { apiUrl } from '../api/api-url';
+import { Api } from '../api/api';
 import { Problem } from '../problems/problem';
 
-export type RoleName =
-  | 'regional-facility-manager'
-  | 'technician'
-  | 'store-manager'
-  | 'shift-lead'
-  | 'account-owner'
-  | 'trainer'
-  | 'administrator';
-
-/** A role of the signed-in person and where it holds. */
-export interface HeldRole {
-  readonly role: RoleName;
-  readonly scopeKind: 'organisation' | 'chain' | 'region' | 'store';
-  readonly scopeId: string;
-  readonly scopeName: string;
-}
-
 /** Who is signed in, as the server answers it. */
-export interface SessionInfo {
-  readonly person: {
-    readonly id: string;
-    readonly name: string;
-    readonly email: string;
-    readonly locale: string;
-    /** IANA name. */
-    readonly timeZone: string;
-  };
-  readonly organisation: { readonly id: string; readonly name: string; readonly timeZone: string };
-  readonly roles: readonly HeldRole[];
-  readonly abilities: readonly string[];
-}
+export type SessionInfo = ReplyOf<typeof readSession>;
 
 /**
  * Who is signed in and what they may do. The abilities only decide what is offered; the server
@@ -43,7 +16,7 @@ export interface SessionInfo {
  */
 @Injectable({ providedIn: 'root' })
 export class Session {
-  private readonly http = inject(HttpClient);
+  private readonly api = inject(Api);
   /** Undefined until the server was asked. */
   private readonly info = signal<SessionInfo | null | undefined>(undefined);
   private asking: Promise<SessionInfo | null> | undefined;
@@ -51,7 +24,7 @@ export class Session {
   readonly current = computed(() => this.info() ?? null);
   readonly person = computed(() => this.current()?.person ?? null);
   readonly roles = computed(() => this.current()?.roles ?? []);
-  private readonly abilities = computed(() => new Set(this.current()?.abilities ?? []));
+  private readonly abilities = computed(() => new Set<Ability>(this.current()?.abilities ?? []));
 
   /** The zone in which this person reads times. */
   readonly timeZone = computed(
@@ -59,7 +32,7 @@ export class Session {
   );
 
   /** Whether the person may do this, to the server's last knowledge. */
-  can(ability: string): boolean {
+  can(ability: Ability): boolean {
     return this.abilities().has(ability);
   }
 
@@ -68,7 +41,7 @@ export class Session {
     const known = this.info();
     if (known !== undefined) return Promise.resolve(known);
     this.asking ??= firstValueFrom(
-      this.http.get<SessionInfo>(apiUrl('/session')).pipe(
+      this.api.call<typeof readSession>('GET', '/session').pipe(
         catchError((failure: unknown) =>
           failure instanceof Problem && failure.status === 401
             ? of(null)
@@ -87,13 +60,13 @@ export class Session {
   }
 
   signIn(email: string, password: string): Observable<SessionInfo> {
-    return this.http
-      .post<SessionInfo>(apiUrl('/session'), { email, password })
+    return this.api
+      .call<typeof signIn>('POST', '/session', { body: { email, password } })
       .pipe(tap((info) => this.info.set(info)));
   }
 
   signOut(): Observable<unknown> {
-    return this.http.delete(apiUrl('/session')).pipe(tap(() => this.forget()));
+    return this.api.call<typeof signOut>('DELETE', '/session').pipe(tap(() => this.forget()));
   }
 
   /** The server no longer knows us. */

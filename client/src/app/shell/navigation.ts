@@ -1,4 +1,5 @@
-import type { RoleName } from '../session/session';
+import type { Ability } from '@shared/access/ability';
+import type { Role } from '@shared/access/role';
 import type { IconName } from '../ui/icon/icon-paths';
 
 /** An entry of the navigation; who holds none of its abilities is not shown it. */
@@ -7,14 +8,14 @@ export interface NavigationItem {
   readonly path: string;
   readonly label: string;
   readonly icon: IconName;
-  readonly anyOf: readonly string[];
+  readonly anyOf: readonly Ability[];
 }
 
 /** In the order in which they stand in the header; what does not fit goes under "More". */
 export const navigation: readonly NavigationItem[] = [];
 
 /** Where each role starts, the broadest role of a person deciding. */
-const starts: readonly (readonly [RoleName, string])[] = [
+const starts: readonly (readonly [Role, string])[] = [
   ['regional-facility-manager', 'board'],
   ['technician', 'today'],
   ['store-manager', 'shift'],
@@ -29,8 +30,8 @@ const starts: readonly (readonly [RoleName, string])[] = [
  * may see, else their account.
  */
 export function landingPath(
-  roles: readonly RoleName[],
-  can: (ability: string) => boolean,
+  roles: readonly Role[],
+  can: (ability: Ability) => boolean,
   items: readonly NavigationItem[] = navigation,
 ): string {
   const allowed = items.filter((item) => item.anyOf.some(can));

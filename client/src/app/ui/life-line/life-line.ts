@@ -1,11 +1,15 @@
+import type { ElementRef } from '@angular/core';
 import {
+  afterNextRender,
   ChangeDetectionStrategy,
   Component,
   computed,
+  DestroyRef,
   inject,
   input,
   LOCALE_ID,
   signal,
+  viewChild,
 } from '@angular/core';
 import { RouterLink } from '@angular/router';
 import { Icon } from '../icon/icon';
@@ -32,6 +36,9 @@ const ICONS: Record<LifeKind, IconName> = {
   judged: 'bench',
 };
 
+/** Pixels that a mark needs to itself. */
+const MARK_WIDTH = 29;
+
 /** A component's life on one axis of time: marks above it, who and what under it. */
 @Component({
   selector: 'vw-life-line',
@@ -52,10 +59,14 @@ export class LifeLine {
   /** Zone of the store, in which the dates are read. */
   readonly zone = input.required<string>();
 
+  private readonly axis = viewChild.required<ElementRef<HTMLElement>>('axis');
+  private readonly width = signal(900);
   protected readonly chosen = signal<string | null>(null);
   protected readonly icons = ICONS;
   protected readonly word = lifeWord;
-  protected readonly placed = computed(() => layOutMarks(this.entries(), this.from(), this.to()));
+  protected readonly placed = computed(() =>
+    layOutMarks(this.entries(), this.from(), this.to(), (MARK_WIDTH / this.width()) * 100),
+  );
   protected readonly height = computed(
     () => 62 + 30 * Math.max(0, ...this.placed().map((item) => item.lane)),
   );
@@ -72,6 +83,17 @@ export class LifeLine {
         : month.format(new Date(tick.at)),
     }));
   });
+
+  constructor() {
+    const destroyRef = inject(DestroyRef);
+    afterNextRender(() => {
+      const observer = new ResizeObserver(([entry]) => {
+        if (entry && entry.contentRect.width > 0) this.width.set(entry.contentRect.width);
+      });
+      observer.observe(this.axis().nativeElement);
+      destroyRef.onDestroy(() => observer.disconnect());
+    });
+  }
 
   protected choose(id: string): void {
     this.chosen.update((chosen) => (chosen === id ? null : id));

@@ -13,6 +13,7 @@ import { VatGlyph } from '../vat-glyph/vat-glyph';
       display: inline-flex;
       align-items: center;
       gap: 6px;
+      vertical-align: middle;
       white-space: nowrap;
     }
   `,
