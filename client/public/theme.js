@@ -1,4 +1,3 @@
-/* global document, localStorage */
 // Sets the remembered theme before the first paint. Without one, the system's own holds.
 (function () {
   try {
