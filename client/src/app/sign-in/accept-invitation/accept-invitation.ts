@@ -8,11 +8,10 @@ import { Router, RouterLink } from '@angular/router';
 import { finalize, switchMap, tap } from 'rxjs';
 import { showInForm } from '../../problems/form-problems';
 import { toProblem } from '../../problems/problem';
-import { problemWords } from '../../problems/problem-words';
+import { ProblemView } from '../../problems/problem-view';
 import { Session } from '../../session/session';
 import { FieldError } from '../../ui/form/field-error';
 import { ProblemSummary } from '../../ui/form/problem-summary';
-import { PageError } from '../../ui/page-states/page-error';
 import { PageLoading } from '../../ui/page-states/page-loading';
 import { newPasswordControl, newPasswordHint } from '../new-password';
 import { PasswordField } from '../password-field/password-field';
@@ -28,10 +27,10 @@ import { SignInApi } from '../sign-in-api';
     MatFormField,
     MatInput,
     MatLabel,
-    PageError,
     PageLoading,
     PasswordField,
     ProblemSummary,
+    ProblemView,
     ReactiveFormsModule,
     RouterLink,
   ],
@@ -54,11 +53,9 @@ export class AcceptInvitation {
         .invitation(params)
         .pipe(tap((invitation) => this.form.controls.name.setValue(invitation.name))),
   });
-  protected readonly failed = computed(() => {
-    const error = this.invitation.error();
-    if (!error) return null;
-    return { words: problemWords(error), spent: [404, 410].includes(toProblem(error).status) };
-  });
+  protected readonly spent = computed(() =>
+    [404, 410].includes(toProblem(this.invitation.error()).status),
+  );
 
   protected readonly form = new FormGroup({
     name: new FormControl('', {

@@ -2,11 +2,11 @@ import { ChangeDetectionStrategy, Component, computed, inject } from '@angular/c
 import { MatButton } from '@angular/material/button';
 import { Router } from '@angular/router';
 import { filter, switchMap } from 'rxjs';
+import { ProblemView } from '../../problems/problem-view';
 import { problemWords } from '../../problems/problem-words';
 import { Session } from '../../session/session';
 import { Confirm } from '../../ui/confirm-dialog/confirm';
 import { Notices } from '../../ui/notice/notices';
-import { PageError } from '../../ui/page-states/page-error';
 import { PageLoading } from '../../ui/page-states/page-loading';
 import { TimeInZonePipe } from '../../ui/text/time-in-zone-pipe';
 import type { OwnSession } from '../account-api';
@@ -15,7 +15,7 @@ import { AccountApi } from '../account-api';
 /** Where the person is signed in, each of which they can end. */
 @Component({
   selector: 'vw-session-list',
-  imports: [MatButton, PageError, PageLoading, TimeInZonePipe],
+  imports: [MatButton, PageLoading, ProblemView, TimeInZonePipe],
   templateUrl: './session-list.html',
   styleUrls: ['./section.scss', './session-list.scss'],
   changeDetection: ChangeDetectionStrategy.OnPush,
@@ -31,10 +31,6 @@ export class SessionList {
   protected readonly sessions = computed(() =>
     this.list.hasValue() ? this.list.value().sessions : [],
   );
-  protected readonly fault = computed(() => {
-    const error = this.list.error();
-    return error ? problemWords(error) : null;
-  });
 
   protected end(session: OwnSession): void {
     this.api.endSession(session.id).subscribe({
