@@ -4,7 +4,7 @@ import { chownSync, existsSync, mkdirSync, readFileSync, rmSync, statSync } from
 import { dirname, join, resolve } from 'node:path';
 import { Failure, failureOf } from './cluster-failure.mjs';
 
-const root = resolve(import.meta.dirname, '..');
+const local = resolve(import.meta.dirname, '..', process.env.VATWRIGHT_LOCAL ?? '.local');
 
 /**
  * The directory of one cluster of this clone, made when missing: under `.local`, or, for root in a
@@ -13,12 +13,12 @@ const root = resolve(import.meta.dirname, '..');
  * @param {{uid: number, gid: number} | undefined} user from `serverUser()`
  */
 export function clusterHome(name, user) {
-  const near = join(root, '.local', name);
+  const near = join(local, name);
   try {
     if (!user) return owned(near, process.getuid?.());
     mkdirSync(dirname(near), { recursive: true });
     if (reaches(user, dirname(near))) return owned(near, user.uid, user);
-    const hash = createHash('sha256').update(root).digest('hex').slice(0, 12);
+    const hash = createHash('sha256').update(local).digest('hex').slice(0, 12);
     return owned(join('/var/lib/postgresql', `vatwright-${hash}`, name), user.uid, user);
   } catch (error) {
     throw failureOf('The folder of the database cannot be made', error);

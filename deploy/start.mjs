@@ -1,4 +1,5 @@
 // `npm start`: the whole product on this machine, and its end at Ctrl-C.
+import { readFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { setTimeout as wait } from 'node:timers/promises';
 import { clusterRunning, startCluster, stopCluster } from '../db/cluster.mjs';
@@ -11,7 +12,6 @@ import { Children, Stopped } from './start/children.mjs';
 import { clearHalfMade, makeDemoWorldOnce } from './start/demo-world.mjs';
 import { claimRun, noteRun, releaseRun } from './start/run-file.mjs';
 import { checkPorts, readSettings } from './start/settings.mjs';
-import { readFileSync } from 'node:fs';
 
 const began = Date.now();
 const seconds = (since = began) => Math.round((Date.now() - since) / 1000);
@@ -33,8 +33,13 @@ async function bringUp(settings) {
   client.catch(() => undefined);
   await buildServer();
   if (own.mail || own.files) {
-    const ports_ = { LOCAL_SMTP_PORT: ports.smtp, LOCAL_INBOX_PORT: ports.inbox };
-    await stay('services', { ...ports_, LOCAL_S3_PORT: ports.files ?? 0 }, { saysReady: true });
+    const where = {
+      LOCAL_DATA: local,
+      LOCAL_SMTP_PORT: ports.smtp ?? 0,
+      LOCAL_INBOX_PORT: ports.inbox ?? 0,
+      LOCAL_S3_PORT: ports.files ?? 0,
+    };
+    await stay('services', where, { saysReady: true });
   }
   if (own.cluster) {
     cluster = startCluster(ports.database);

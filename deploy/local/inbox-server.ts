@@ -66,7 +66,8 @@ function answer(store: MailStore, req: IncomingMessage, reply: Reply): void {
   if (!message) return reply.missing();
   if (part === 'source') return reply.send(200, 'text/plain', store.source(id) ?? '');
   if (part === 'formatted') {
-    const body = `<base target="_blank" />${message.html}`;
+    // Links open outside the frame; before the head the element would switch on quirks mode.
+    const body = message.html.replace(/<head[^>]*>|^/i, (head) => `${head}<base target="_blank">`);
     return reply.send(200, 'text/html', body, mailPolicy);
   }
   return reply.page(messagePage(message));

@@ -1,4 +1,4 @@
-import { existsSync, mkdirSync, readdirSync, rmSync } from 'node:fs';
+import { existsSync, mkdirSync, readdirSync, renameSync, rmSync } from 'node:fs';
 import { join } from 'node:path';
 import { unpacked } from '../../db/cluster-programs.mjs';
 import { Failure } from '../../db/cluster-failure.mjs';
@@ -32,7 +32,10 @@ export function unpackPackages(what, names, log) {
   const task = `Unpacking ${what} from Debian's packages`;
   const apt = join(local, 'apt');
   const files = join(apt, 'archives');
-  for (const folder of [join(apt, 'lists/partial'), join(files, 'partial'), unpacked]) {
+  // Unpacked aside and renamed, so that an interrupted start leaves nothing that looks complete.
+  const aside = `${unpacked}.new`;
+  rmSync(aside, { recursive: true, force: true });
+  for (const folder of [join(apt, 'lists/partial'), join(files, 'partial'), aside]) {
     mkdirSync(folder, { recursive: true });
   }
   const options = {
@@ -51,7 +54,9 @@ export function unpackPackages(what, names, log) {
   const wanted = [...plan.matchAll(/^Inst (\S+) /gm)].map(([, name]) => name);
   run(['-q', 'download', ...wanted], files);
   for (const file of readdirSync(files).filter((it) => it.endsWith('.deb'))) {
-    runLogged(task, 'dpkg', ['-x', join(files, file), unpacked], { log, env: quiet });
+    runLogged(task, 'dpkg', ['-x', join(files, file), aside], { log, env: quiet });
   }
+  rmSync(unpacked, { recursive: true, force: true });
+  renameSync(aside, unpacked);
   rmSync(apt, { recursive: true, force: true });
 }

@@ -3,7 +3,8 @@ import { join, resolve } from 'node:path';
 import { Failure, failureOf } from '../../db/cluster-failure.mjs';
 
 export const root = resolve(import.meta.dirname, '../..');
-export const local = join(root, '.local');
+/** What this machine keeps for the clone. Another folder makes a second installation of it. */
+export const local = resolve(root, process.env.VATWRIGHT_LOCAL ?? '.local');
 
 // Packages take 0.65 GB, Angular's cache and the builds 0.1, a seeded database 0.3.
 const megabytesForFirstStart = 1500;
