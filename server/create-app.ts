@@ -38,7 +38,7 @@ export function createApp(services: Services): Express {
   api.use(nothingHere);
 
   app.use('/api/v1', api);
-  app.use(serveClient(config));
+  app.use(serveClient());
   app.use(nothingHere);
   app.use(problemHandler(log));
   return app;

@@ -1,17 +1,18 @@
 import { existsSync, readFileSync } from 'node:fs';
 import { join } from 'node:path';
 import express, { type Request, Router } from 'express';
-import type { Config } from '../config';
 
 const locales = ['en', 'es'] as const;
 type Locale = (typeof locales)[number];
+/** What the builder named after its content never changes under that name. */
+const hashed = /-[A-Z0-9]{8}\.[a-z0-9]+$/;
 const root = join(process.cwd(), 'dist/client/browser');
 
 /**
  * The built application, once per language under `/en/` and `/es/`. A page asked for in another
  * language than the reader's own is sent on to theirs, so that a shared link opens for everybody.
  */
-export function serveClient(_config: Config): Router {
+export function serveClient(): Router {
   const router = Router();
   const pages = new Map<Locale, string>();
   for (const locale of locales) {
@@ -19,7 +20,13 @@ export function serveClient(_config: Config): Router {
     if (existsSync(index)) pages.set(locale, readFileSync(index, 'utf8'));
     router.use(
       `/${locale}`,
-      express.static(join(root, locale), { index: false, immutable: true, maxAge: '1y' }),
+      express.static(join(root, locale), {
+        index: false,
+        setHeaders: (res, path) => {
+          const forever = hashed.test(path);
+          res.set('Cache-Control', forever ? 'public, max-age=31536000, immutable' : 'no-cache');
+        },
+      }),
     );
   }
   router.get('/{*path}', (req, res, next) => {
@@ -34,7 +41,7 @@ export function serveClient(_config: Config): Router {
     const page = pages.get(wanted);
     if (!page) return next();
     res.set('Cache-Control', 'no-store').type('html');
-    res.send(page.replaceAll('CSP_NONCE', res.cspNonce ?? ''));
+    res.send(page.replaceAll('__CSP_NONCE__', res.cspNonce ?? ''));
   });
   return router;
 }
