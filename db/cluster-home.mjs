@@ -1,6 +1,14 @@
 import { spawnSync } from 'node:child_process';
 import { createHash } from 'node:crypto';
-import { chownSync, existsSync, mkdirSync, readFileSync, rmSync, statSync } from 'node:fs';
+import {
+  chmodSync,
+  chownSync,
+  existsSync,
+  mkdirSync,
+  readFileSync,
+  rmSync,
+  statSync,
+} from 'node:fs';
 import { dirname, join, resolve } from 'node:path';
 import { Failure, failureOf } from './cluster-failure.mjs';
 
@@ -19,9 +27,19 @@ export function clusterHome(name, user) {
     mkdirSync(dirname(near), { recursive: true });
     if (reaches(user, dirname(near))) return owned(near, user.uid, user);
     const hash = createHash('sha256').update(local).digest('hex').slice(0, 12);
-    return owned(join('/var/lib/postgresql', `vatwright-${hash}`, name), user.uid, user);
+    const far = join('/var/lib/postgresql', `vatwright-${hash}`, name);
+    makeReachable(dirname(far));
+    return owned(far, user.uid, user);
   } catch (error) {
     throw failureOf('The folder of the database cannot be made', error);
+  }
+}
+
+/** Whatever root's umask is, the user `postgres` must be able to pass. */
+function makeReachable(folder) {
+  const first = mkdirSync(folder, { recursive: true });
+  for (let made = folder; first && made.startsWith(first); made = dirname(made)) {
+    chmodSync(made, 0o755);
   }
 }
 
@@ -31,7 +49,10 @@ function reaches(user, folder) {
 
 function owned(home, uid, user) {
   const fresh = !existsSync(home);
-  if (fresh) mkdirSync(home, { recursive: true, mode: 0o700 });
+  if (fresh) {
+    mkdirSync(dirname(home), { recursive: true });
+    mkdirSync(home, { mode: 0o700 });
+  }
   if (fresh && user) chownSync(home, user.uid, user.gid);
   if (statSync(home).uid !== uid) {
     throw new Failure(

@@ -1,6 +1,6 @@
 import { Client } from 'pg';
 import { connect } from '@db/connect';
-import { migrator } from '@db/migrate';
+import { migrator } from '@db/migrator';
 
 /** Makes `vatwright_template` anew, migrated, with the task months that specs use. */
 async function makeTemplate(): Promise<void> {
