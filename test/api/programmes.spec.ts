@@ -296,6 +296,10 @@ describe('programmes', () => {
         '2027-03-31T06:00:00',
         '2027-05-31T06:00:00',
       ]);
+      expect(body.words).toEqual({
+        en: 'Every month on the 31st at 06:00.',
+        es: 'Cada mes el día 31 a las 06:00.',
+      });
       const bad = await ask(['FREQ=DAILY;BYWEEKNO=3']).expect(200);
       expect(bad.body).toMatchObject({
         words: null,
