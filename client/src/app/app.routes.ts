@@ -8,6 +8,7 @@ import signInRoutes from './sign-in/sign-in.routes';
  * routes by default. What the navigation shows of them stands in `shell/navigation.ts`.
  */
 const features: Routes = [
+  { path: 'procedures', loadChildren: () => import('./procedures/procedures.routes') },
   { path: 'account', loadChildren: () => import('./sign-in/account.routes') },
 ];
 

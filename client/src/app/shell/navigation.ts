@@ -12,7 +12,14 @@ export interface NavigationItem {
 }
 
 /** In the order in which they stand in the header; what does not fit goes under "More". */
-export const navigation: readonly NavigationItem[] = [];
+export const navigation: readonly NavigationItem[] = [
+  {
+    path: 'procedures',
+    label: $localize`:@@procedures.title:Procedures`,
+    icon: 'procedure',
+    anyOf: ['procedures.read'],
+  },
+];
 
 /** Where each role starts, the broadest role of a person deciding. */
 const starts: readonly (readonly [Role, string])[] = [
