@@ -15,23 +15,34 @@ export function dictionaryOf<T>(entries: readonly (readonly [string, T])[]): Dic
   return { pattern: new RegExp(texts.map(escape).join('|'), 'y'), values: new Map(entries) };
 }
 
-/** Reads items joined by commas and, before the last, by `last`; null where none stands at `at`. */
-export function listAt<T>(
+/** A text that was understood up to `end`. */
+export interface Reading<T> {
+  readonly value: T;
+  readonly end: number;
+}
+
+/**
+ * Reads items joined by commas and, before the last, by `last`: every list that begins at `at`, the
+ * longest first, as what looks like one more item may belong to the next clause ("at minute 0, 2
+ * times").
+ */
+export function listsAt<T>(
   items: Dictionary<T>,
   last: string,
   text: string,
   at: number,
-): { readonly values: T[]; readonly end: number } | null {
+): Reading<T[]>[] {
+  const lists: Reading<T[]>[] = [];
   const values: T[] = [];
   let next = itemAt(items, text, at);
-  let end = at;
   while (next) {
     values.push(next.value);
-    end = next.end;
+    const { end } = next;
+    lists.unshift({ value: [...values], end });
     const joint = text.startsWith(', ', end) ? 2 : text.startsWith(last, end) ? last.length : 0;
     next = joint === 0 ? null : itemAt(items, text, end + joint);
   }
-  return values.length > 0 ? { values, end } : null;
+  return lists;
 }
 
 /** Reads the longest item that stands at `at`. */
@@ -39,12 +50,10 @@ export function itemAt<T>(
   { pattern, values }: Dictionary<T>,
   text: string,
   at: number,
-): { readonly value: T; readonly end: number } | null {
+): Reading<T> | null {
   const match = matchAt(pattern, text, at);
   const value = match && values.get(match[0]);
-  return match && value !== undefined && value !== null
-    ? { value, end: at + match[0].length }
-    : null;
+  return match && value !== undefined ? { value: value as T, end: at + match[0].length } : null;
 }
 
 /** Matches a sticky pattern at `at` only. */

@@ -9,9 +9,10 @@ import {
   dictionaryOf,
   escape,
   itemAt,
-  listAt,
+  listsAt,
   matchAt,
   range,
+  type Reading,
 } from './phrase-dictionary';
 import { isProblems, parseRule } from './parse-rule';
 import { FREQUENCIES, plainRule, type Rule, type RuleDay, type Until } from './rule';
@@ -19,8 +20,8 @@ import type { Lead, RuleLanguage, RuleWords } from './rule-words';
 
 type Found = Partial<Rule>;
 
-/** Reads one clause at `at` if it stands there: what it says, and where it ends. */
-type Clause = (text: string, at: number) => { readonly says: Found; readonly end: number } | null;
+/** Reads one clause at `at`, in every way in which it may stand there. */
+type Clause = (text: string, at: number) => readonly Reading<Found>[];
 
 const WEEKDAYS: readonly Weekday[] = [0, 1, 2, 3, 4, 5, 6];
 
@@ -47,10 +48,9 @@ function readFrom(
 ): Found | null {
   const clause = clauses[index];
   if (!clause) return at === text.length ? {} : null;
-  const here = clause(text, at);
-  if (here) {
-    const rest = readFrom(clauses, index + 1, text, here.end);
-    if (rest) return { ...here.says, ...rest };
+  for (const { value, end } of clause(text, at)) {
+    const rest = readFrom(clauses, index + 1, text, end);
+    if (rest) return { ...value, ...rest };
   }
   return index === 0 ? null : readFrom(clauses, index + 1, text, at);
 }
@@ -111,11 +111,11 @@ function everyClause(words: RuleWords): Clause {
     for (const { frequency, pattern } of several) {
       const match = matchAt(pattern, text, at);
       if (match) {
-        return { says: { frequency, interval: Number(match[1]) }, end: at + match[0].length };
+        return [{ value: { frequency, interval: Number(match[1]) }, end: at + match[0].length }];
       }
     }
     const item = itemAt(one, text, at);
-    return item && { says: { frequency: item.value }, end: item.end };
+    return item ? [{ value: { frequency: item.value }, end: item.end }] : [];
   };
 }
 
@@ -125,7 +125,7 @@ function weeksFromClause(words: RuleWords): Clause {
   );
   return (text, at) => {
     const item = itemAt(phrases, text, at);
-    return item && { says: { weekStart: item.value }, end: item.end };
+    return item ? [{ value: { weekStart: item.value }, end: item.end }] : [];
   };
 }
 
@@ -134,7 +134,7 @@ function countClause(words: RuleWords): Clause {
   const once = new RegExp(escape(words.once), 'y');
   return (text, at) => {
     const match = matchAt(times, text, at) ?? matchAt(once, text, at);
-    return match && { says: { count: Number(match[1] ?? 1) }, end: at + match[0].length };
+    return match ? [{ value: { count: Number(match[1] ?? 1) }, end: at + match[0].length }] : [];
   };
 }
 
@@ -152,7 +152,7 @@ function untilClause(words: RuleWords): Clause {
     const two = (n: number | string) => String(n).padStart(2, '0');
     const until =
       match && readUntil(`${year}-${two(months.indexOf(month) + 1)}-${two(day)}`, clock, utc);
-    return until ? { says: { until }, end: at + (match?.[0].length ?? 0) } : null;
+    return until ? [{ value: { until }, end: at + (match?.[0].length ?? 0) }] : [];
   };
 }
 
@@ -200,16 +200,14 @@ function listClause<T>(
 ): Clause {
   const joint = lead === 'daysLimiting' ? words.or : words.and;
   const forms = words.leads[lead].map((form) => form.toLowerCase().split('{list}'));
-  return (text, at) => {
-    for (const [before = '', after = ''] of forms) {
-      if (!text.startsWith(before, at)) continue;
-      const list = listAt(items, joint, text, at + before.length);
-      if (list && text.startsWith(after, list.end)) {
-        return { says: says(list.values), end: list.end + after.length };
-      }
-    }
-    return null;
-  };
+  return (text, at) =>
+    forms.flatMap(([before = '', after = '']) =>
+      text.startsWith(before, at)
+        ? listsAt(items, joint, text, at + before.length)
+            .filter(({ end }) => text.startsWith(after, end))
+            .map(({ value, end }) => ({ value: says(value), end: end + after.length }))
+        : [],
+    );
 }
 
 function unique(numbers: readonly number[]): number[] {
