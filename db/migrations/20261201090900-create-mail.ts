@@ -15,6 +15,7 @@ export const createMail = sqlMigration(
       kind text NOT NULL,
       dedupe_key text NOT NULL UNIQUE,
       to_address text NOT NULL,
+      locale text NOT NULL DEFAULT 'en' CHECK (locale IN ('en', 'es')),
       subject text NOT NULL,
       html text NOT NULL,
       plain text NOT NULL,
@@ -28,6 +29,7 @@ export const createMail = sqlMigration(
     );
     CREATE INDEX ON letters (next_attempt_at) WHERE state = 'queued';
     CREATE INDEX ON letters (organisation_id, created_at DESC);
+    CREATE INDEX ON letters (person_id, kind, created_at DESC);
     CREATE TABLE task_notices (
       organisation_id uuid NOT NULL REFERENCES organisations,
       person_id uuid NOT NULL REFERENCES people,

@@ -26,6 +26,16 @@ export const createCompliance = sqlMigration(
       day date NOT NULL,
       PRIMARY KEY (store_id, day)
     );
+    -- Who finds a day already marked holds on to the mark until commit, so that the roll-up, which
+    -- passes over marks that are held, never counts a day just before a change to it is committed.
+    CREATE FUNCTION hold_stale_day() RETURNS trigger LANGUAGE plpgsql AS $$
+      BEGIN
+        PERFORM FROM stale_days WHERE store_id = NEW.store_id AND day = NEW.day FOR KEY SHARE;
+        RETURN NEW;
+      END
+    $$;
+    CREATE TRIGGER hold_stale_day BEFORE INSERT ON stale_days
+      FOR EACH ROW EXECUTE FUNCTION hold_stale_day();
     CREATE TABLE digests (
       id uuid PRIMARY KEY DEFAULT gen_random_uuid(),
       organisation_id uuid NOT NULL REFERENCES organisations,
@@ -38,5 +48,8 @@ export const createCompliance = sqlMigration(
     ${['compliance_days', 'stale_days', 'digests'].map((table) => tenantTable(table)).join('\n')}
     REVOKE UPDATE, DELETE ON digests FROM vatwright_app;
   `,
-  `DROP TABLE digests, stale_days, compliance_days;`,
+  `
+    DROP TABLE digests, stale_days, compliance_days;
+    DROP FUNCTION hold_stale_day;
+  `,
 );

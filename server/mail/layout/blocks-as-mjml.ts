@@ -1,0 +1,60 @@
+import type { Block } from '@shared/mail/block';
+import { escapeMarkup as esc } from './escape-markup';
+import { light } from './mail-colours';
+
+type Of<Kind extends Block['kind']> = Extract<Block, { kind: Kind }>;
+
+/** One block as MJML elements of a column. */
+export function blockAsMjml(block: Block): string {
+  switch (block.kind) {
+    case 'heading':
+      return `<mj-text padding-top="22px" css-class="ink"><h2 style="margin:0;font-size:18px;line-height:24px;font-weight:600">${esc(block.text)}</h2></mj-text>`;
+    case 'paragraph':
+      return `<mj-text css-class="ink">${esc(block.text)}</mj-text>`;
+    case 'note':
+      return `<mj-text font-size="14px" line-height="20px" color="${light('ink2')}" css-class="ink2">${esc(block.text)}</mj-text>`;
+    case 'button':
+      return `<mj-button href="${esc(block.href)}" background-color="${light('kelp')}" color="${light('onKelp')}" border-radius="8px" align="left" font-size="16px" font-weight="600" inner-padding="12px 22px" padding="12px 24px" css-class="button">${esc(block.label)}</mj-button>`;
+    case 'figures':
+      return figures(block);
+    case 'table':
+      return table(block);
+    case 'list':
+      return list(block);
+  }
+}
+
+function figures({ figures: all }: Of<'figures'>): string {
+  const cells = all.map(
+    ({ value, label, tone }) =>
+      `<td style="padding:4px 22px 4px 0;vertical-align:top"><div class="${tone === 'alert' ? 'alert' : 'ink'}" style="font-size:27px;line-height:34px;color:${light(tone === 'alert' ? 'alert' : 'ink')}">${esc(value)}</div><div class="ink2" style="font-size:14px;line-height:18px;color:${light('ink2')}">${esc(label)}</div></td>`,
+  );
+  // A layout, not data: screen readers are told so.
+  return `<mj-table role="presentation"><tr>${cells.join('')}</tr></mj-table>`;
+}
+
+function table({ caption, columns, rows }: Of<'table'>): string {
+  const align = (index: number) => (columns[index]?.numeric ? 'right' : 'left');
+  const head = columns.map(
+    ({ label }, index) =>
+      `<th scope="col" class="ink2 line" style="text-align:${align(index)};padding:4px 8px 4px 0;font-size:13px;font-weight:600;color:${light('ink2')};border-bottom:1px solid ${light('line')}">${esc(label)}</th>`,
+  );
+  const body = rows.map((row) => {
+    const cells = row.map(
+      (cell, index) =>
+        `<td class="ink line" style="text-align:${align(index)};padding:6px 8px 6px 0;vertical-align:top;border-bottom:1px solid ${light('line')}">${esc(cell)}</td>`,
+    );
+    return `<tr>${cells.join('')}</tr>`;
+  });
+  return `<mj-table font-size="14px" line-height="19px" css-class="ink"><caption class="ink2" style="text-align:left;font-size:13px;padding:0 0 4px;color:${light('ink2')}">${esc(caption)}</caption><thead><tr>${head.join('')}</tr></thead><tbody>${body.join('')}</tbody></mj-table>`;
+}
+
+function list({ title, lines }: Of<'list'>): string {
+  const items = lines.map(({ text, href }) => {
+    const words = href
+      ? `<a class="link" href="${esc(href)}" style="color:${light('kelp')}">${esc(text)}</a>`
+      : esc(text);
+    return `<li style="margin:4px 0">${words}</li>`;
+  });
+  return `<mj-text css-class="ink"><div style="font-weight:600">${esc(title)}</div><ul style="margin:2px 0 0;padding:0 0 0 20px">${items.join('')}</ul></mj-text>`;
+}
