@@ -70,7 +70,7 @@ export function messagePage(message: Message): Markup {
     ${links.length > 0 ? linkList(links) : markup``}
     <section aria-labelledby="text">
       <h2 id="text">Text part</h2>
-      ${message.text ? markup`<pre tabindex="0" role="region" aria-labelledby="text">${message.text}</pre>` : markup`<p>This message has none.</p>`}
+      ${message.text ? markup`<pre>${message.text}</pre>` : markup`<p>This message has none.</p>`}
     </section>
     <details>
       <summary>Headers</summary>

@@ -66,11 +66,17 @@ function answer(store: MailStore, req: IncomingMessage, reply: Reply): void {
   if (!message) return reply.missing();
   if (part === 'source') return reply.send(200, 'text/plain', store.source(id) ?? '');
   if (part === 'formatted') {
-    // Links open outside the frame; before the head the element would switch on quirks mode.
-    const body = message.html.replace(/<head[^>]*>|^/i, (head) => `${head}<base target="_blank">`);
-    return reply.send(200, 'text/html', body, mailPolicy);
+    return reply.send(200, 'text/html', linksOutside(message.html), mailPolicy);
   }
   return reply.page(messagePage(message));
+}
+
+/** Links open outside the frame. Before a doctype the element would switch on quirks mode. */
+function linksOutside(html: string): string {
+  const base = '<base target="_blank">';
+  return /<head[^>]*>/i.test(html)
+    ? html.replace(/<head[^>]*>/i, (head) => head + base)
+    : base + html;
 }
 
 function answerProgram(store: MailStore, req: IncomingMessage, url: URL, reply: Reply): void {

@@ -23,8 +23,7 @@ main { max-width: 64rem; margin: 0 auto; padding: 22px; }
 h1 { margin: 0 0 12px; font-size: 27px; line-height: 1.2; }
 h2 { margin: 22px 0 8px; font-size: 18px; }
 a { color: var(--kelp); }
-a:focus-visible, button:focus-visible, input:focus-visible, summary:focus-visible,
-pre:focus-visible { outline: 3px solid var(--kelp); outline-offset: 2px; }
+a:focus-visible, button:focus-visible, input:focus-visible, summary:focus-visible { outline: 3px solid var(--kelp); outline-offset: 2px; }
 form { display: flex; flex-wrap: wrap; gap: 8px; align-items: center; margin-bottom: 16px; }
 input, button { min-height: 44px; padding: 4px 12px; border-radius: 10px; font: inherit; }
 input { flex: 1 1 16rem; background: var(--card); color: inherit; border: 1px solid var(--ink-2); }

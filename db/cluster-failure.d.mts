@@ -1,0 +1,2 @@
+export class Failure extends Error {}
+export function failureOf(what: string, output: unknown, log?: string): Failure;

@@ -1,0 +1,1 @@
+export function readable(line: string): { readonly text: string; readonly grave: boolean };
