@@ -18,6 +18,7 @@ export default tseslint.config(
         console: 'readonly',
         URL: 'readonly',
         require: 'readonly',
+        jest: 'readonly',
         module: 'writable',
         __dirname: 'readonly',
         __filename: 'readonly',

@@ -13,7 +13,7 @@ const node = {
   transform: esbuild,
   transformIgnorePatterns: ['/node_modules/(?!(ical\\.js|fast-check|pure-rand)/)'],
   moduleNameMapper: alias,
-  testTimeout: 60000,
+  setupFilesAfterEnv: ['<rootDir>/test/support/patience.cjs'],
 };
 module.exports = {
   projects: [
@@ -59,7 +59,6 @@ module.exports = {
       rootDir: __dirname,
       roots: ['<rootDir>/test/journeys'],
       testMatch: ['**/*.spec.ts'],
-      testTimeout: 180000,
       globalSetup: '<rootDir>/test/support/journey-setup.cjs',
       globalTeardown: '<rootDir>/test/support/journey-teardown.cjs',
     },

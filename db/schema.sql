@@ -279,6 +279,8 @@ CREATE TABLE public.one_time_links (
     organisation_id uuid NOT NULL,
     person_id uuid NOT NULL,
     purpose text NOT NULL,
+    made_by uuid,
+    made_at timestamp with time zone DEFAULT now() NOT NULL,
     expires_at timestamp with time zone NOT NULL,
     used_at timestamp with time zone,
     CONSTRAINT one_time_links_purpose_check CHECK ((purpose = ANY (ARRAY['invitation'::text, 'password-reset'::text])))
@@ -410,6 +412,7 @@ CREATE TABLE public.routes (
     on_date date NOT NULL,
     published_at timestamp with time zone,
     published_by uuid,
+    published_version integer,
     version integer DEFAULT 0 NOT NULL
 );
 
@@ -837,7 +840,11 @@ CREATE INDEX letters_person_id_kind_created_at_idx ON public.letters USING btree
 
 CREATE INDEX long_jobs_created_at_idx ON public.long_jobs USING btree (created_at) WHERE (state = ANY (ARRAY['waiting'::text, 'running'::text]));
 
+CREATE UNIQUE INDEX one_fitted_component ON public.components USING btree (unit_id, kind) WHERE ((removed_on IS NULL) AND (kind <> 'hose'::text));
+
 CREATE UNIQUE INDEX one_standing_inspection ON public.inspections USING btree (task_id) WHERE (undone_at IS NULL);
+
+CREATE INDEX one_time_links_person_id_purpose_idx ON public.one_time_links USING btree (person_id, purpose);
 
 CREATE UNIQUE INDEX people_email ON public.people USING btree (email);
 
@@ -1001,6 +1008,9 @@ ALTER TABLE ONLY public.long_jobs
 
 ALTER TABLE ONLY public.long_jobs
     ADD CONSTRAINT long_jobs_organisation_id_fkey FOREIGN KEY (organisation_id) REFERENCES public.organisations(id);
+
+ALTER TABLE ONLY public.one_time_links
+    ADD CONSTRAINT one_time_links_made_by_fkey FOREIGN KEY (made_by) REFERENCES public.people(id);
 
 ALTER TABLE ONLY public.one_time_links
     ADD CONSTRAINT one_time_links_organisation_id_fkey FOREIGN KEY (organisation_id) REFERENCES public.organisations(id);

@@ -4,6 +4,8 @@ import type { Routes } from '@angular/router';
 const routes: Routes = [
   {
     path: '',
+    // The bare address belongs to the frame, which sends strangers here.
+    canMatch: [(_route, segments) => segments.length > 0],
     loadComponent: () => import('./entrance/entrance').then((m) => m.Entrance),
     children: [
       {
