@@ -22,17 +22,22 @@ export function findServer(wanted) {
       .filter((it) => wanted === undefined || it === wanted)
       .sort((a, b) => b - a)[0];
     if (version) {
-      return { bin: join(home, String(version), 'bin'), version, env: libraries(base) };
+      return {
+        bin: join(home, String(version), 'bin'),
+        version,
+        env: base === '/' ? {} : librariesUnder(base),
+      };
     }
   }
   return undefined;
 }
 
 /** Unpacked programs look for their libraries beside themselves first. */
-function libraries(base) {
-  if (base === '/') return {};
+export function librariesUnder(base) {
   const triplet = { x64: 'x86_64-linux-gnu', arm64: 'aarch64-linux-gnu' }[process.arch] ?? '';
-  const folders = [`usr/lib/${triplet}`, `lib/${triplet}`, 'usr/lib'].map((it) => join(base, it));
+  const folders = [`usr/lib/${triplet}`, `usr/lib/${triplet}/pulseaudio`, `lib/${triplet}`].map(
+    (it) => join(base, it),
+  );
   return { LD_LIBRARY_PATH: [...folders, process.env.LD_LIBRARY_PATH].filter(Boolean).join(':') };
 }
 

@@ -41,6 +41,7 @@ const env = {
   ...process.env,
   VATWRIGHT_TEST_PG: cluster.adminUrl,
   CHROMIUM_PATH: chromiumPath() ?? '',
+  AWS_SDK_JS_NODE_VERSION_SUPPORT_WARNING_DISABLED: 'true',
 };
 let results;
 try {

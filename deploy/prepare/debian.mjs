@@ -1,6 +1,5 @@
 import { existsSync, mkdirSync, readdirSync, renameSync, rmSync } from 'node:fs';
 import { join } from 'node:path';
-import { unpacked } from '../../db/cluster-programs.mjs';
 import { Failure } from '../../db/cluster-failure.mjs';
 import { local } from './ground.mjs';
 import { runLogged } from './run-logged.mjs';
@@ -23,17 +22,17 @@ export function installPackages(what, names, log) {
 }
 
 /**
- * Unpacks Debian packages, and those they need that the machine lacks, under `.local/debian`: all
- * that a user without root's rights can do. The lists are private ones, as the machine's may be
- * missing or old.
+ * Unpacks Debian packages, and those they need that the machine lacks, into a folder: all that a
+ * user without root's rights can do. The lists are private ones, as the machine's may be missing or
+ * old.
  */
-export function unpackPackages(what, names, log) {
+export function unpackPackages(what, names, into, log) {
   needApt(what);
   const task = `Unpacking ${what} from Debian's packages`;
   const apt = join(local, 'apt');
   const files = join(apt, 'archives');
   // Unpacked aside and renamed, so that an interrupted start leaves nothing that looks complete.
-  const aside = `${unpacked}.new`;
+  const aside = `${into}.new`;
   rmSync(aside, { recursive: true, force: true });
   for (const folder of [join(apt, 'lists/partial'), join(files, 'partial'), aside]) {
     mkdirSync(folder, { recursive: true });
@@ -56,7 +55,7 @@ export function unpackPackages(what, names, log) {
   for (const file of readdirSync(files).filter((it) => it.endsWith('.deb'))) {
     runLogged(task, 'dpkg', ['-x', join(files, file), aside], { log, env: quiet });
   }
-  rmSync(unpacked, { recursive: true, force: true });
-  renameSync(aside, unpacked);
+  rmSync(into, { recursive: true, force: true });
+  renameSync(aside, into);
   rmSync(apt, { recursive: true, force: true });
 }

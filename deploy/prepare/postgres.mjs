@@ -1,6 +1,6 @@
 import { existsSync, mkdirSync, readFileSync, writeFileSync } from 'node:fs';
 import { failureOf } from '../../db/cluster-failure.mjs';
-import { findServer } from '../../db/cluster-programs.mjs';
+import { findServer, unpacked } from '../../db/cluster-programs.mjs';
 import { installPackages, isRoot, unpackPackages } from './debian.mjs';
 import { say } from './ground.mjs';
 
@@ -14,7 +14,7 @@ export function preparePostgres() {
     forbidMainCluster();
     installPackages('PostgreSQL', ['postgresql'], 'postgresql.log');
   } else {
-    unpackPackages('PostgreSQL', ['postgresql'], 'postgresql.log');
+    unpackPackages('PostgreSQL', ['postgresql'], unpacked, 'postgresql.log');
   }
 }
 

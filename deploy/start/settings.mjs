@@ -34,6 +34,8 @@ function environment(env, port, own) {
     ...env,
     NODE_ENV: env.NODE_ENV ?? 'development',
     PORT: String(port),
+    // Node 20 is what the product is made for; the reminder would fill the logs.
+    AWS_SDK_JS_NODE_VERSION_SUPPORT_WARNING_DISABLED: 'true',
     SESSION_SECRET: env.SESSION_SECRET ?? sessionSecret(),
     ...(own.mail && { SMTP_URL: `smtp://127.0.0.1:${port + 2}` }),
     ...(own.files && {
