@@ -1,19 +1,23 @@
+import { fleetRoutes } from './fleet/fleet-routes';
 import { findingRoutes } from './findings/finding-routes';
 import { inspectionRoutes } from './inspections/inspection-routes';
 import { shiftCheckRoutes } from './shift-checks/shift-check-routes';
 import { proceduresRoutes } from './procedures/procedures-routes';
 import { programmesRoutes } from './programmes/programmes-routes';
 import { rulesRoutes } from './programmes/rules-routes';
+import { mailRoutes } from './mail/mail-routes';
 import type { Routes } from './http/routes';
 import { signInRoutes } from './sign-in/sign-in-routes';
 
 /** The only file that lists every feature. */
 export function registerFeatures(routes: Routes): void {
   signInRoutes(routes);
-  rulesRoutes(routes);
-  programmesRoutes(routes);
+  fleetRoutes(routes);
   proceduresRoutes(routes);
+  programmesRoutes(routes);
+  rulesRoutes(routes);
   inspectionRoutes(routes);
   shiftCheckRoutes(routes);
   findingRoutes(routes);
+  mailRoutes(routes);
 }

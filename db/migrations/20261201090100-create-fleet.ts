@@ -79,6 +79,9 @@ export const createFleet = sqlMigration(
       CHECK (pump_face IS NULL OR kind = 'pump')
     );
     CREATE INDEX ON components (unit_id, kind, installed_on);
+    -- Of hoses a unit may have several.
+    CREATE UNIQUE INDEX one_fitted_component ON components (unit_id, kind)
+      WHERE removed_on IS NULL AND kind <> 'hose';
     ${tables.map((table) => tenantTable(table)).join('\n')}
   `,
   `DROP TABLE components, units, stores, chains, regions;`,
