@@ -34,9 +34,12 @@ export const createPeople = sqlMigration(
       organisation_id uuid NOT NULL REFERENCES organisations,
       person_id uuid NOT NULL REFERENCES people,
       purpose text NOT NULL CHECK (purpose IN ('invitation', 'password-reset')),
+      made_by uuid REFERENCES people,
+      made_at timestamptz NOT NULL DEFAULT now(),
       expires_at timestamptz NOT NULL,
       used_at timestamptz
     );
+    CREATE INDEX ON one_time_links (person_id, purpose);
     ${['people', 'role_grants', 'one_time_links'].map((table) => tenantTable(table)).join('\n')}
 
     -- Before sign-in no organisation is known, so these two look past row-level security, and give

@@ -11,6 +11,8 @@ export const createVisits = sqlMigration(
       on_date date NOT NULL,
       published_at timestamptz,
       published_by uuid REFERENCES people,
+      -- The version that the technician was told about; a later one has changed since.
+      published_version integer,
       version integer NOT NULL DEFAULT 0,
       UNIQUE (technician_id, on_date)
     );

@@ -5,7 +5,16 @@ import passport from 'passport';
 import type { Services } from '../http/services';
 import type { SignedInUser } from '../http/signed-in-user';
 
-const IDLE = 12 * 60 * 60 * 1000;
+/** Milliseconds without use after which a session is over. */
+export const IDLE = 12 * 60 * 60 * 1000;
+
+declare module 'express-session' {
+  interface SessionData {
+    /** When and with what the person signed in, for their own list of sessions. */
+    startedAt?: string;
+    userAgent?: string;
+  }
+}
 
 /**
  * Sessions in PostgreSQL under a random id in a cookie that scripts cannot read. A session ends after

@@ -1,39 +1,31 @@
-import { RateLimiterPostgres, type RateLimiterRes } from 'rate-limiter-flexible';
-import { Problem } from '@shared/problem';
 import type { Services } from '../http/services';
+import { rateLimit } from './rate-limit';
+
+const QUARTER_HOUR = 900;
 
 /**
- * Slows guessing down, counted in PostgreSQL so that all servers share the count. Per account and
- * address together: a stranger's guesses never lock the owner out elsewhere.
+ * Slows guessing down. Per account and address together: a stranger's guesses never lock the owner
+ * out elsewhere.
  */
 export function signInLimits({ sessionPool }: Pick<Services, 'sessionPool'>) {
-  const store = { storeClient: sessionPool, tableName: 'rate_limits', tableCreated: true } as const;
-  const perPair = new RateLimiterPostgres({
-    ...store,
-    keyPrefix: 'sign-in-pair',
-    points: 10,
-    duration: 900,
-  });
-  const perAddress = new RateLimiterPostgres({
-    ...store,
-    keyPrefix: 'sign-in-address',
-    points: 100,
-    duration: 900,
-  });
+  const limit = (name: string, tries: number, seconds = QUARTER_HOUR) =>
+    rateLimit(sessionPool, { name, tries, seconds });
+  const perPair = limit('sign-in-pair', 10);
+  const perAddress = limit('sign-in-address', 100);
   return {
     /** @throws Problem 429 after ten tries for one account, or a hundred in all, in 15 minutes. */
     async take(address: string, email: string): Promise<void> {
-      try {
-        await perAddress.consume(address);
-        await perPair.consume(`${address} ${email}`);
-      } catch (refused) {
-        if (refused instanceof Error) throw refused;
-        const minutes = Math.ceil((refused as RateLimiterRes).msBeforeNext / 60_000);
-        throw new Problem(429, 'too-many-tries', 'Too many tries.', {
-          detail: `Try again in ${minutes} minutes.`,
-        });
-      }
+      await perAddress.take(address);
+      await perPair.take(`${address} ${email}`);
     },
-    succeeded: (address: string, email: string) => perPair.delete(`${address} ${email}`),
+    succeeded: (address: string, email: string) => perPair.clear(`${address} ${email}`),
+    /** Letters asked for from one network address. */
+    letters: limit('reset-address', 20),
+    /** Letters to one mailbox: enough for whoever mistypes, too few to flood it. */
+    lettersTo: limit('reset-mailbox', 5, 3600),
+    /** Links tried from one network address. */
+    links: limit('link-address', 60),
+    /** Present passwords tried by one person who is signed in. */
+    ownPassword: limit('own-password', 10),
   };
 }

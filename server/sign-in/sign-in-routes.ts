@@ -5,6 +5,7 @@ import { loadActor } from '../access/load-actor';
 import { recordEvent } from '../audit/record-event';
 import { issueToken } from '../http/cross-site-defence';
 import type { Routes } from '../http/routes';
+import { accountRoutes } from './account-routes';
 import { findSignIn } from './find-sign-in';
 import { passwordFits } from './password';
 import { presentSession } from './present-session';
@@ -44,4 +45,6 @@ export function signInRoutes(routes: Routes): void {
     res.clearCookie(config.secure ? '__Host-vatwright' : 'vatwright');
     res.clearCookie('XSRF-TOKEN');
   });
+
+  accountRoutes(routes);
 }

@@ -50,3 +50,5 @@ export const signOut = endpoint({
   access: 'public',
   reply: z.undefined(),
 });
+
+export const signInEndpoints = [readSession, signIn, signOut];

@@ -1,7 +1,5 @@
 import { FormControl, Validators } from '@angular/forms';
-
-/** Fewest characters of a password; the server holds the same number. */
-export const PASSWORD_MIN = 12;
+import { passwordLength } from '@shared/sign-in/password-length';
 
 /** A control for a password being chosen: long enough, otherwise as the person likes. */
 export function newPasswordControl(): FormControl<string> {
@@ -9,11 +7,11 @@ export function newPasswordControl(): FormControl<string> {
     nonNullable: true,
     validators: [
       Validators.required,
-      Validators.minLength(PASSWORD_MIN),
-      Validators.maxLength(128),
+      Validators.minLength(passwordLength.min),
+      Validators.maxLength(passwordLength.max),
     ],
   });
 }
 
 /** What to say beside it. */
-export const newPasswordHint = $localize`:@@sign-in.password-hint:At least ${PASSWORD_MIN}:count: characters. Several unrelated words work well.`;
+export const newPasswordHint = $localize`:@@sign-in.password-hint:At least ${passwordLength.min}:count: characters. Several unrelated words work well.`;
