@@ -1,3 +1,6 @@
+import { rollUpCompliance } from './compliance/roll-up';
+import { queueReminders } from './mail/queue-reminders';
+import { sendLetters } from './mail/send-letters';
 import type { WorkerServices } from './services';
 
 /** One piece of recurring work. */
@@ -6,8 +9,14 @@ export interface Job {
   /** Length of a slot; each slot is worked once, by whichever worker comes first. */
   readonly everySeconds: number;
   /** @param slot the instant at which the slot began */
-  run(services: WorkerServices, slot: Date): Promise<void>;
+  run(services: WorkerServices, slot: Date): Promise<unknown>;
 }
 
+const minutes = (count: number) => count * 60;
+
 /** The timetable as data: what the worker does and how often. */
-export const timetable: readonly Job[] = [];
+export const timetable: readonly Job[] = [
+  { name: 'roll-up-compliance', everySeconds: minutes(5), run: rollUpCompliance },
+  { name: 'queue-reminders', everySeconds: minutes(5), run: queueReminders },
+  { name: 'send-letters', everySeconds: 10, run: (services) => sendLetters(services) },
+];

@@ -1,0 +1,147 @@
+import type { Locale } from '../mail/locale';
+
+/** The sentences of the digest in one language; figures come in already written out. */
+interface DigestWords {
+  subject(chain: string, month: string): string;
+  preview(rate: string, overdue: string): string;
+  title(chain: string, month: string): string;
+  onTime: string;
+  change: string;
+  /** What the rate is made of, said once, so that nobody has to guess. */
+  basis(onTime: string, counted: string): string;
+  leftOut(excused: string, covered: string): string;
+  noWindows: string;
+  points(signed: string): string;
+  noChange: string;
+  overdue: string;
+  notDone: string;
+  findings: string;
+  cost: string;
+  decide: string;
+  nothingToDecide: string;
+  stopped(cause: string, place: string, since: string): string;
+  stoppedTitle: string;
+  lowTitle: string;
+  low(store: string, rate: string, counts: string): string;
+  months: string;
+  month: string;
+  stores: string;
+  store: string;
+  rate: string;
+  late: string;
+  of(onTime: string, counted: string): string;
+  overdueTitle: string;
+  overdueNone: string;
+  count: string;
+  oldest: string;
+  findingsTitle: string;
+  findingsNone: string;
+  cause: string;
+  stop: string;
+  unsettled: string;
+  repairsTitle: string;
+  repairs(count: string, parts: string, labour: string): string;
+  repairsNone: string;
+  more(count: string): string;
+  definition: string;
+  safety: string;
+}
+
+const en: DigestWords = {
+  subject: (chain, month) => `${chain}: maintenance in ${month}`,
+  preview: (rate, overdue) => `On time ${rate}, overdue at the month’s end ${overdue}`,
+  title: (chain, month) => `${chain}, ${month}`,
+  onTime: 'on time',
+  change: 'against the month before',
+  basis: (onTime, counted) => `${onTime} of ${counted} tasks were done within their window.`,
+  leftOut: (excused, covered) =>
+    `Left out of the rate: ${excused} excused, ${covered} covered by a larger inspection.`,
+  noWindows: 'No window of a task closed in this month, so there is no rate.',
+  points: (signed) => `${signed} points`,
+  noChange: 'no change',
+  overdue: 'overdue at the month’s end',
+  notDone: 'not done in their window',
+  findings: 'findings',
+  cost: 'parts and labor',
+  decide: 'What to decide',
+  nothingToDecide: 'Nothing waits for a decision: no unit is stopped and no store fell behind.',
+  stopped: (cause, place, since) => `${place}: ${cause}, since ${since}`,
+  stoppedTitle: 'Units that findings say to stop using, not settled',
+  lowTitle: 'Stores with fewer than four of five tasks on time',
+  low: (store, rate, counts) => `${store}: ${rate} (${counts})`,
+  months: 'Month by month',
+  month: 'Month',
+  stores: 'Stores, lowest rate first',
+  store: 'Store',
+  rate: 'On time',
+  late: 'Late',
+  of: (onTime, counted) => `${onTime} of ${counted}`,
+  overdueTitle: 'Overdue at the month’s end',
+  overdueNone: 'No task was overdue as the month ended.',
+  count: 'Tasks',
+  oldest: 'Oldest window closed',
+  findingsTitle: 'Findings by cause',
+  findingsNone: 'No findings were written down in this month.',
+  cause: 'Cause',
+  stop: 'Stop using it',
+  unsettled: 'Not settled',
+  repairsTitle: 'Repairs',
+  repairs: (count, parts, labour) => `${count}; parts ${parts}, labor ${labour}.`,
+  repairsNone: 'No repairs were recorded in this month.',
+  more: (count) => `and ${count} more`,
+  definition:
+    'On-time rate: tasks done within their window ÷ tasks whose window closed in the month, less excused and covered. A task counts on the local day of its store on which its window closed. Figures are kept as they stood when this digest was made.',
+  safety:
+    'A rate says what was done, not that a unit is safe. Local codes and licensed practice decide.',
+};
+
+const es: DigestWords = {
+  subject: (chain, month) => `${chain}: mantenimiento de ${month}`,
+  preview: (rate, overdue) => `A tiempo ${rate}, atrasadas al cierre del mes ${overdue}`,
+  title: (chain, month) => `${chain}, ${month}`,
+  onTime: 'a tiempo',
+  change: 'respecto al mes anterior',
+  basis: (onTime, counted) => `${onTime} de ${counted} tareas se hicieron dentro de su plazo.`,
+  leftOut: (excused, covered) =>
+    `Fuera del cálculo: ${excused} justificadas, ${covered} cubiertas por una inspección mayor.`,
+  noWindows: 'Ningún plazo terminó este mes, así que no hay porcentaje.',
+  points: (signed) => `${signed} puntos`,
+  noChange: 'sin cambio',
+  overdue: 'atrasadas al cierre del mes',
+  notDone: 'sin hacer en su plazo',
+  findings: 'hallazgos',
+  cost: 'piezas y mano de obra',
+  decide: 'Lo que hay que decidir',
+  nothingToDecide:
+    'Nada espera una decisión: ningún equipo está detenido y ninguna tienda quedó atrás.',
+  stopped: (cause, place, since) => `${place}: ${cause}, desde el ${since}`,
+  stoppedTitle: 'Equipos que un hallazgo pide dejar de usar, sin resolver',
+  lowTitle: 'Tiendas con menos de cuatro de cada cinco tareas a tiempo',
+  low: (store, rate, counts) => `${store}: ${rate} (${counts})`,
+  months: 'Mes a mes',
+  month: 'Mes',
+  stores: 'Tiendas, de menor a mayor porcentaje',
+  store: 'Tienda',
+  rate: 'A tiempo',
+  late: 'Tarde',
+  of: (onTime, counted) => `${onTime} de ${counted}`,
+  overdueTitle: 'Atrasadas al cierre del mes',
+  overdueNone: 'Ninguna tarea estaba atrasada al cerrar el mes.',
+  count: 'Tareas',
+  oldest: 'Plazo más antiguo vencido',
+  findingsTitle: 'Hallazgos por causa',
+  findingsNone: 'No se anotaron hallazgos este mes.',
+  cause: 'Causa',
+  stop: 'Dejar de usar',
+  unsettled: 'Sin resolver',
+  repairsTitle: 'Reparaciones',
+  repairs: (count, parts, labour) => `${count}; piezas ${parts}, mano de obra ${labour}.`,
+  repairsNone: 'No se registraron reparaciones este mes.',
+  more: (count) => `y ${count} más`,
+  definition:
+    'Porcentaje a tiempo: tareas hechas dentro de su plazo ÷ tareas cuyo plazo terminó en el mes, sin las justificadas ni las cubiertas. Una tarea cuenta el día local de su tienda en que terminó su plazo. Las cifras se conservan como estaban al hacer este resumen.',
+  safety:
+    'El porcentaje dice qué se hizo, no que un equipo sea seguro. Deciden los códigos locales y los profesionales con licencia.',
+};
+
+export const digestWords: Readonly<Record<Locale, DigestWords>> = { en, es };
