@@ -76,15 +76,25 @@ CREATE FUNCTION public.ensure_task_months(from_on date, to_on date) RETURNS void
     LANGUAGE plpgsql SECURITY DEFINER
     SET search_path TO 'public'
     AS $$
-      DECLARE month date := date_trunc('month', from_on);
+      DECLARE
+        month date := date_trunc('month', from_on);
+        following date;
+        name text;
       BEGIN
         PERFORM pg_advisory_xact_lock(hashtext('ensure_task_months'));
         WHILE month <= to_on LOOP
-          IF to_regclass(format('tasks_%s', to_char(month, 'YYYY_MM'))) IS NULL THEN
-            EXECUTE format('CREATE TABLE %I PARTITION OF tasks FOR VALUES FROM (%L) TO (%L)',
-              'tasks_' || to_char(month, 'YYYY_MM'), month, month + interval '1 month');
+          name := 'tasks_' || to_char(month, 'YYYY_MM');
+          following := month + interval '1 month';
+          IF to_regclass(name) IS NULL THEN
+            LOCK TABLE tasks_beyond IN ACCESS EXCLUSIVE MODE;
+            EXECUTE format('CREATE TABLE %I (LIKE tasks INCLUDING DEFAULTS INCLUDING CONSTRAINTS)', name);
+            EXECUTE format('WITH moved AS (DELETE FROM tasks_beyond
+              WHERE occurs_local >= %L AND occurs_local < %L RETURNING *)
+              INSERT INTO %I SELECT * FROM moved', month, following, name);
+            EXECUTE format('ALTER TABLE tasks ATTACH PARTITION %I FOR VALUES FROM (%L) TO (%L)',
+              name, month, following);
           END IF;
-          month := month + interval '1 month';
+          month := following;
         END LOOP;
       END
     $$;
