@@ -7,6 +7,7 @@ import { programmesRoutes } from './programmes/programmes-routes';
 import { rulesRoutes } from './programmes/rules-routes';
 import { mailRoutes } from './mail/mail-routes';
 import type { Routes } from './http/routes';
+import { todayRoutes } from './today/today-routes';
 import { signInRoutes } from './sign-in/sign-in-routes';
 
 /** The only file that lists every feature. */
@@ -17,6 +18,7 @@ export function registerFeatures(routes: Routes): void {
   programmesRoutes(routes);
   rulesRoutes(routes);
   inspectionRoutes(routes);
+  todayRoutes(routes);
   shiftCheckRoutes(routes);
   findingRoutes(routes);
   mailRoutes(routes);
