@@ -15,7 +15,7 @@ import type { Actor } from '../access/actor';
 import { recordEvent } from '../audit/record-event';
 import { readingFaults } from './check-readings';
 import { mayCloseTask } from './inspection-policy';
-import { nameplateOf } from './present-task-sheet';
+import { nameplatesOf, unknownNameplate } from './sheet-parts';
 import { type TaskRow, stateOf } from './task-rows';
 
 export type InspectionDraft = BodyOf<typeof endpoint>;
@@ -59,7 +59,8 @@ export async function closeTask(
   const faults = readingFaults(version.content, draft.readings);
   if (faults.length > 0) throw invalid(faults);
 
-  const nameplate = await nameplateOf(tenant, row.unitId);
+  const nameplates = await nameplatesOf(tenant, row.unitId ? [row.unitId] : []);
+  const nameplate = nameplates.get(row.unitId ?? '') ?? unknownNameplate;
   await tenant.rows(
     `INSERT INTO inspections (id, organisation_id, task_id, procedure_version_id, store_id, unit_id,
        person_id, started_at, finished_at, note)

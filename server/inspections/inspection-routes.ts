@@ -1,5 +1,6 @@
 import {
   closeTask as closeTaskEndpoint,
+  readTaskHistory,
   readTaskSheet,
   reportCouldNot as reportCouldNotEndpoint,
   undoInspection as undoInspectionEndpoint,
@@ -8,6 +9,7 @@ import type { Routes } from '../http/routes';
 import { closeTask } from './close-task';
 import { presentTaskSheet } from './present-task-sheet';
 import { reportCouldNot } from './report-could-not';
+import { taskHistory } from './task-history';
 import { taskRow } from './task-rows';
 import { undoInspection } from './undo-inspection';
 
@@ -29,5 +31,10 @@ export function inspectionRoutes(routes: Routes): void {
   routes.on(reportCouldNotEndpoint, async ({ tenant, actor, params, body }) => {
     const row = await taskRow(tenant, actor, 'tasks.read', params.id, true);
     await reportCouldNot(tenant, actor, row, body);
+  });
+
+  routes.on(readTaskHistory, async ({ tenant, actor, params }) => {
+    await taskRow(tenant, actor, 'tasks.read', params.id);
+    return taskHistory(tenant, params.id);
   });
 }

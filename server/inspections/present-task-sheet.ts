@@ -1,23 +1,22 @@
 import type { ReplyOf } from '@shared/contract/endpoint';
-import type { StepReading, readTaskSheet } from '@shared/inspections/inspections-contract';
+import type { readTaskSheet } from '@shared/inspections/inspections-contract';
 import type { ProcedureContent } from '@shared/procedures/procedure-content';
 import { type Limit, type MotorNameplate, limitOf } from '@shared/procedures/within-limit';
 import { Problem } from '@shared/problem';
 import type { Tenant } from '@db/tenant-transaction';
 import type { Actor } from '../access/actor';
-import { mayCloseTask } from './inspection-policy';
+import { mayCloseTask, mayUndo } from './inspection-policy';
+import {
+  type PublishedVersion,
+  type StandingInspection,
+  nameplatesOf,
+  publishedVersions,
+  standingInspections,
+  unknownNameplate,
+} from './sheet-parts';
 import { type TaskRow, stateOf } from './task-rows';
 
 export type TaskSheet = ReplyOf<typeof readTaskSheet>;
-
-interface Standing {
-  id: string;
-  by: string;
-  finishedAt: Date;
-  note: string;
-  versionId: string;
-  readings: { reading: StepReading; withinLimits: boolean | null }[];
-}
 
 /**
  * A task with its procedure: the version it was done under, else the newest published one.
@@ -29,14 +28,57 @@ export async function presentTaskSheet(
   row: TaskRow,
   now: Date,
 ): Promise<TaskSheet> {
-  const standing = await standingInspection(tenant, row.id);
-  const version = await tenant.row<{ id: string; content: ProcedureContent }>(
-    `SELECT id, content FROM procedure_versions
-     WHERE procedure_id = $1 AND published_at IS NOT NULL AND ($2::uuid IS NULL OR id = $2)
-     ORDER BY number DESC LIMIT 1`,
-    [row.procedureId, standing?.versionId ?? null],
+  const [sheet] = await presentTaskSheets(tenant, actor, [row], now);
+  if (!sheet) throw new Problem(409, 'not-published', 'This procedure is not published yet.');
+  return sheet;
+}
+
+/** Sheets of several tasks in three reads; tasks of an unpublished procedure have none. */
+export async function presentTaskSheets(
+  tenant: Tenant,
+  actor: Actor,
+  rows: readonly TaskRow[],
+  now: Date,
+): Promise<TaskSheet[]> {
+  if (rows.length === 0) return [];
+  const standing = await standingInspections(
+    tenant,
+    rows.map(({ id }) => id),
   );
-  if (!version) throw new Problem(409, 'not-published', 'This procedure is not published yet.');
+  const versions = await publishedVersions(
+    tenant,
+    rows.map(({ procedureId }) => procedureId),
+    standing.map(({ versionId }) => versionId),
+  );
+  const nameplates = await nameplatesOf(
+    tenant,
+    rows.flatMap(({ unitId }) => unitId ?? []),
+  );
+  return rows.flatMap((row) => {
+    const inspection = standing.find(({ taskId }) => taskId === row.id);
+    const version = versionFor(row, inspection, versions);
+    const nameplate = nameplates.get(row.unitId ?? '') ?? unknownNameplate;
+    return version ? [sheetOf(actor, row, inspection, version, nameplate, now)] : [];
+  });
+}
+
+function versionFor(
+  row: TaskRow,
+  inspection: StandingInspection | undefined,
+  versions: readonly PublishedVersion[],
+): PublishedVersion | undefined {
+  if (inspection) return versions.find(({ id }) => id === inspection.versionId);
+  return versions.find(({ procedureId, newest }) => procedureId === row.procedureId && newest);
+}
+
+function sheetOf(
+  actor: Actor,
+  row: TaskRow,
+  inspection: StandingInspection | undefined,
+  version: PublishedVersion,
+  nameplate: MotorNameplate,
+  now: Date,
+): TaskSheet {
   const state = stateOf(row, now);
   return {
     task: {
@@ -63,31 +105,23 @@ export async function presentTaskSheet(
         : null,
     procedureVersionId: version.id,
     procedure: version.content,
-    limits: limitsOf(version.content, await nameplateOf(tenant, row.unitId)),
-    inspection: standing
+    limits: limitsOf(version.content, nameplate),
+    inspection: inspection
       ? {
-          id: standing.id,
-          by: standing.by,
-          finishedAt: standing.finishedAt.toISOString(),
-          note: standing.note,
-          readings: standing.readings,
+          id: inspection.id,
+          by: inspection.by,
+          finishedAt: inspection.finishedAt.toISOString(),
+          note: inspection.note,
+          readings: inspection.readings,
+          findings: inspection.findings,
         }
       : null,
     mayClose: mayCloseTask(actor, row, state),
+    mayUndo:
+      row.outcome === 'done' && inspection !== undefined
+        ? mayUndo(actor, row, inspection.personId)
+        : false,
   };
-}
-
-/** The nameplate of the motor that is in the unit now; unknown where there is no unit or motor. */
-export async function nameplateOf(tenant: Tenant, unitId: string | null): Promise<MotorNameplate> {
-  const motor = unitId
-    ? await tenant.row<{ nameplate: Partial<MotorNameplate> }>(
-        `SELECT nameplate FROM components
-         WHERE unit_id = $1 AND kind = 'motor' AND removed_on IS NULL
-         ORDER BY installed_on DESC LIMIT 1`,
-        [unitId],
-      )
-    : undefined;
-  return { volts: motor?.nameplate.volts ?? null, amps: motor?.nameplate.amps ?? null };
 }
 
 function limitsOf(content: ProcedureContent, nameplate: MotorNameplate): Record<string, Limit> {
@@ -97,22 +131,4 @@ function limitsOf(content: ProcedureContent, nameplate: MotorNameplate): Record<
     if (limit) limits[step.key] = limit;
   }
   return limits;
-}
-
-function standingInspection(tenant: Tenant, taskId: string): Promise<Standing | undefined> {
-  return tenant.row<Standing>(
-    `SELECT i.id, p.name AS by, i.finished_at AS "finishedAt", i.note,
-       i.procedure_version_id AS "versionId",
-       coalesce((SELECT jsonb_agg(jsonb_build_object('withinLimits', g.within_limits, 'reading',
-         jsonb_strip_nulls(jsonb_build_object('step', g.step, 'kind', g.kind,
-           'ok', CASE WHEN g.kind = 'check' THEN g.number_value = 1 END,
-           'value', CASE WHEN g.kind = 'number' THEN g.number_value END,
-           'choice', CASE WHEN g.kind = 'choice' THEN g.text_value END,
-           'text', CASE WHEN g.kind = 'text' THEN g.text_value END,
-           'photoIds', CASE WHEN g.kind = 'photo' THEN to_jsonb(g.photo_ids) END))))
-         FROM readings g WHERE g.inspection_id = i.id), '[]') AS readings
-     FROM inspections i JOIN people p ON p.id = i.person_id
-     WHERE i.task_id = $1 AND i.undone_at IS NULL`,
-    [taskId],
-  );
 }

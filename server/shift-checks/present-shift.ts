@@ -4,7 +4,8 @@ import { Binds } from '@db/binds';
 import type { Tenant } from '@db/tenant-transaction';
 import type { Actor } from '../access/actor';
 import { visibleStores } from '../access/visible-stores';
-import { presentTaskSheet } from '../inspections/present-task-sheet';
+import { presentTaskSheets } from '../inspections/present-task-sheet';
+import { comingVisits } from './coming-visits';
 import { taskRows } from '../inspections/task-rows';
 
 interface StoreRow {
@@ -33,7 +34,7 @@ export async function presentShift(
   );
   const stores = rows.map(({ id, number, name }) => ({ id, number, name }));
   const store = rows.find(({ id }) => id === wanted) ?? rows[0];
-  if (!store) return { stores, storeId: null, timeZone: null, waiting: [], done: [] };
+  if (!store) return { stores, storeId: null, timeZone: null, waiting: [], done: [], visits: [] };
   const waiting = await taskRows(
     tenant,
     actor,
@@ -56,15 +57,12 @@ export async function presentShift(
      ORDER BY t.outcome_at DESC`,
     [store.id, now, store.timeZone],
   );
-  const sheets = [];
-  for (const row of waiting.slice(0, MOST)) {
-    sheets.push(await presentTaskSheet(tenant, actor, row, now));
-  }
   return {
     stores,
     storeId: store.id,
     timeZone: store.timeZone,
-    waiting: sheets,
+    waiting: await presentTaskSheets(tenant, actor, waiting.slice(0, MOST), now),
+    visits: await comingVisits(tenant, store, now),
     done: done.map((it) => ({ ...it, at: it.at.toISOString() })),
   };
 }

@@ -1,6 +1,8 @@
 import * as z from 'zod';
 import { endpoint } from '../contract/endpoint';
+import { causes, severities } from '../findings/cause';
 import { procedureContent } from '../procedures/procedure-content';
+import { componentKinds } from '../procedures/step-kind';
 import { taskStates } from '../tasks/task-state';
 
 const taskParams = z.strictObject({ id: z.uuid() });
@@ -65,9 +67,20 @@ export const taskSheet = z.strictObject({
       finishedAt: z.iso.datetime(),
       note: z.string(),
       readings: z.array(z.strictObject({ reading, withinLimits: z.boolean().nullable() })),
+      /** What the readings out of limit turned into, the gravest first. */
+      findings: z.array(
+        z.strictObject({
+          id: z.uuid(),
+          cause: z.enum(causes),
+          severity: z.enum(severities),
+          componentKind: z.enum(componentKinds).nullable(),
+          settled: z.boolean(),
+        }),
+      ),
     })
     .nullable(),
   mayClose: z.boolean(),
+  mayUndo: z.boolean(),
 });
 
 export const readTaskSheet = endpoint({
@@ -118,4 +131,32 @@ export const reportCouldNot = endpoint({
   reply: z.undefined(),
 });
 
-export const inspectionEndpoints = [readTaskSheet, closeTask, undoInspection, reportCouldNot];
+export const readTaskHistory = endpoint({
+  method: 'GET',
+  path: '/tasks/:id/history',
+  summary: 'Who did what to a task and when, newest first',
+  access: 'tasks.read',
+  params: taskParams,
+  reply: z.strictObject({
+    events: z.array(
+      z.strictObject({
+        at: z.iso.datetime(),
+        /** Null where no person acted: a job did. */
+        by: z.string().nullable(),
+        action: z.string(),
+        reason: z.string().nullable(),
+        note: z.string().nullable(),
+        /** How many findings the act made. */
+        findings: z.int().nullable(),
+      }),
+    ),
+  }),
+});
+
+export const inspectionEndpoints = [
+  readTaskSheet,
+  closeTask,
+  undoInspection,
+  reportCouldNot,
+  readTaskHistory,
+];

@@ -23,6 +23,17 @@ export const readShift = endpoint({
         onTime: z.boolean(),
       }),
     ),
+    /** Published visits of the next two weeks, the first one first. */
+    visits: z.array(
+      z.strictObject({
+        id: z.uuid(),
+        onDate: z.iso.date(),
+        technician: z.string(),
+        note: z.string(),
+        tasks: z.int(),
+        minutes: z.int(),
+      }),
+    ),
   }),
 });
 

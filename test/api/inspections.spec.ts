@@ -90,6 +90,39 @@ describe('doing a task', () => {
     ]);
   });
 
+  it('tells on the sheet what was found and who may take the closing back', async () => {
+    const drips = { step: 'seal', kind: 'choice', choice: 'drips' };
+    const amps = { step: 'amps', kind: 'number', value: 12 };
+    const vents = { step: 'vents', kind: 'check', ok: true };
+    await technician
+      .put(`/tasks/${taskId}/inspection`, inspection([vents, amps, drips]))
+      .expect(200);
+    const own = await technician.get(`/tasks/${taskId}/sheet`).expect(200);
+    expect(own.body.inspection.findings).toMatchObject([
+      { cause: 'worn-seal', severity: 'stop', componentKind: 'pump', settled: false },
+      { cause: 'bearing', severity: 'plan', componentKind: 'motor', settled: false },
+    ]);
+    expect(own.body.mayUndo).toBe(true);
+    const seen = await colleague.get(`/tasks/${taskId}/sheet`).expect(200);
+    expect(seen.body.mayUndo).toBe(false);
+  });
+
+  it('remembers who did what to a task', async () => {
+    await colleague
+      .post(`/tasks/${taskId}/could-not`, { reason: 'in-use', note: 'Lunch rush' })
+      .expect(204);
+    await technician.put(`/tasks/${taskId}/inspection`, inspection()).expect(200);
+    await technician.delete(`/tasks/${taskId}/inspection`).expect(200);
+    const { body } = await technician.get(`/tasks/${taskId}/history`).expect(200);
+    const [undone, done, couldNot] = body.events;
+    expect(body.events).toHaveLength(3);
+    expect([undone.action, done.action, couldNot.action]).toEqual(['undone', 'done', 'could-not']);
+    expect(done.findings).toBe(0);
+    expect(couldNot).toMatchObject({ reason: 'in-use', note: 'Lunch rush' });
+    expect(undone.by).toBe(done.by);
+    expect(couldNot.by).not.toBe(done.by);
+  });
+
   it('names every step that lacks an answer or does not fit', async () => {
     const { body } = await technician
       .put(
@@ -159,27 +192,6 @@ describe('doing a task', () => {
     const person = await makePerson(app.db, other.organisationId, 'technician');
     const stranger = await app.browser().signIn(person.email);
     await stranger.get(`/tasks/${taskId}/sheet`).expect(404);
-  });
-
-  it('lets the store acknowledge its own checks, never a technician’s task', async () => {
-    const shift = await makeWork(app.db, fleet, 'store');
-    const checkId = await shift.makeTask();
-    const store = { kind: 'store', id: fleet.storeId } as const;
-    const person = await makePerson(app.db, fleet.organisationId, 'store-manager', store);
-    const manager = await app.browser().signIn(person.email);
-    const { body } = await manager.get('/shift').expect(200);
-    expect(body.waiting.map((it: { task: { id: string } }) => it.task.id)).toEqual([checkId]);
-    const checks = (id: string, of: string) => ({
-      checks: [{ taskId: id, inspection: inspection(undefined, { procedureVersionId: of }) }],
-    });
-    await manager
-      .post('/shift/acknowledgements', checks(taskId, work.procedureVersionId))
-      .expect(403);
-    await manager
-      .post('/shift/acknowledgements', checks(checkId, shift.procedureVersionId))
-      .expect(200);
-    const after = await manager.get('/shift').expect(200);
-    expect(after.body.waiting).toEqual([]);
-    expect(after.body.done).toHaveLength(1);
+    await stranger.get(`/tasks/${taskId}/history`).expect(404);
   });
 });
