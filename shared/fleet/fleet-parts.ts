@@ -1,6 +1,8 @@
 import * as z from 'zod';
 import { standings } from './fleet-words';
 
+export { fileFormat, fileReply } from '../exports/export-format';
+
 /** Pieces that the contracts of the fleet share. */
 export const version = z.int().min(0);
 export const byId = z.strictObject({ id: z.uuid() });
@@ -26,8 +28,3 @@ export const paging = {
 
 export const pageOf = <Row extends z.ZodType>(row: Row) =>
   z.strictObject({ rows: z.array(row), total: z.int(), page: z.int(), pageSize: z.int() });
-
-export const fileFormat = { format: z.enum(['csv', 'xlsx']) };
-
-/** What a download answers: a file, not JSON. */
-export const fileReply = z.undefined();

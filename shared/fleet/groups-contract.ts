@@ -1,6 +1,17 @@
 import * as z from 'zod';
 import { endpoint } from '../contract/endpoint';
-import { byId, byVersion, instant, name, pageOf, paging, searchOf, version } from './fleet-parts';
+import {
+  byId,
+  byVersion,
+  fileFormat,
+  fileReply,
+  instant,
+  name,
+  pageOf,
+  paging,
+  searchOf,
+  version,
+} from './fleet-parts';
 
 const fields = z.strictObject({ name: name(120) });
 
@@ -16,10 +27,9 @@ export const group = z.strictObject({
   mayEdit: z.boolean(),
 });
 
-const query = z.strictObject({
-  ...searchOf(['name', '-name', 'stores', '-stores', 'units', '-units']),
-  ...paging,
-});
+const filters = searchOf(['name', '-name', 'stores', '-stores', 'units', '-units']);
+const query = z.strictObject({ ...filters, ...paging });
+const fileQuery = z.strictObject({ ...filters, ...fileFormat });
 
 export const listChains = endpoint({
   method: 'GET',
@@ -28,6 +38,15 @@ export const listChains = endpoint({
   access: 'fleet.read',
   query,
   reply: pageOf(group),
+});
+
+export const exportChains = endpoint({
+  method: 'GET',
+  path: '/chains/export',
+  summary: 'The chains of a list, as a file',
+  access: 'fleet.read',
+  query: fileQuery,
+  reply: fileReply,
 });
 
 export const createChain = endpoint({
@@ -78,6 +97,15 @@ export const listRegions = endpoint({
   reply: pageOf(group),
 });
 
+export const exportRegions = endpoint({
+  method: 'GET',
+  path: '/regions/export',
+  summary: 'The regions of a list, as a file',
+  access: 'fleet.read',
+  query: fileQuery,
+  reply: fileReply,
+});
+
 export const createRegion = endpoint({
   method: 'POST',
   path: '/regions',
@@ -119,11 +147,13 @@ export const restoreRegion = endpoint({
 
 export const groupEndpoints = [
   listChains,
+  exportChains,
   createChain,
   editChain,
   retireChain,
   restoreChain,
   listRegions,
+  exportRegions,
   createRegion,
   editRegion,
   retireRegion,
