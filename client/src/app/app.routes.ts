@@ -9,6 +9,7 @@ import signInRoutes from './sign-in/sign-in.routes';
  */
 const features: Routes = [
   { path: 'procedures', loadChildren: () => import('./procedures/procedures.routes') },
+  { path: 'programmes', loadChildren: () => import('./programmes/programmes.routes') },
   { path: 'account', loadChildren: () => import('./sign-in/account.routes') },
 ];
 

@@ -1,6 +1,6 @@
 import type { Routes } from '@angular/router';
 import { can } from '../session/session-guard';
-import { leaveUnsaved } from './editor/leave-unsaved-guard';
+import { leaveUnsaved } from '../ui/confirm-dialog/leave-unsaved-guard';
 
 const routes: Routes = [
   {

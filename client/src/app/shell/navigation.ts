@@ -14,6 +14,12 @@ export interface NavigationItem {
 /** In the order in which they stand in the header; what does not fit goes under "More". */
 export const navigation: readonly NavigationItem[] = [
   {
+    path: 'programmes',
+    label: $localize`:@@programmes.title:Programmes`,
+    icon: 'programme',
+    anyOf: ['programmes.read'],
+  },
+  {
     path: 'procedures',
     label: $localize`:@@procedures.title:Procedures`,
     icon: 'procedure',

@@ -34,7 +34,7 @@ import { ProceduresApi } from '../procedures-api';
 import { VersionChanges } from '../version-changes/version-changes';
 import { contentOf, draftForm, emptyContent } from './draft-form';
 import { draftLabels } from './draft-labels';
-import type { HoldsWork } from './leave-unsaved-guard';
+import type { HoldsWork } from '../../ui/confirm-dialog/leave-unsaved-guard';
 import { StepList } from './step-list';
 import { TextList } from './text-list';
 import { TextPair } from './text-pair';
@@ -64,6 +64,7 @@ import { TextPair } from './text-pair';
   ],
   templateUrl: './procedure-editor.html',
   styleUrl: './procedure-editor.scss',
+  host: { '(window:beforeunload)': 'askBeforeUnload($event)' },
   changeDetection: ChangeDetectionStrategy.OnPush,
 })
 export class ProcedureEditor implements HoldsWork {
@@ -119,6 +120,10 @@ export class ProcedureEditor implements HoldsWork {
   }
 
   readonly hasUnsavedWork = (): boolean => this.form().dirty;
+
+  protected askBeforeUnload(event: BeforeUnloadEvent): void {
+    if (this.hasUnsavedWork()) event.preventDefault();
+  }
 
   protected togglePreview(): void {
     this.preview.update((shown) => (shown ? null : contentOf(this.form())));
