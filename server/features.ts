@@ -5,8 +5,10 @@ import { shiftCheckRoutes } from './shift-checks/shift-check-routes';
 import { proceduresRoutes } from './procedures/procedures-routes';
 import { programmesRoutes } from './programmes/programmes-routes';
 import { rulesRoutes } from './programmes/rules-routes';
+import { complianceRoutes } from './compliance/compliance-routes';
 import { mailRoutes } from './mail/mail-routes';
 import type { Routes } from './http/routes';
+import { uploadRoutes } from './uploads/upload-routes';
 import { todayRoutes } from './today/today-routes';
 import { signInRoutes } from './sign-in/sign-in-routes';
 
@@ -19,7 +21,9 @@ export function registerFeatures(routes: Routes): void {
   rulesRoutes(routes);
   inspectionRoutes(routes);
   todayRoutes(routes);
+  uploadRoutes(routes);
   shiftCheckRoutes(routes);
   findingRoutes(routes);
+  complianceRoutes(routes);
   mailRoutes(routes);
 }

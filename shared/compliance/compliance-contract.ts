@@ -15,10 +15,11 @@ export const MOST_MONTHS = 36;
 /** A share from 0 to 1; null where no window counted, which is not 0 %. */
 const rate = z.number().min(0).max(1).nullable();
 
-/** The counts behind a rate, and the rate of the equally long range of months before. */
+/** The counts behind a rate, and the same of the equally long range of months just before. */
 const figures = {
   counts: windowCounts,
   rate,
+  previousCounts: windowCounts,
   previousRate: rate,
   /** Percentage points against the range before. */
   change: z.number().nullable(),
@@ -45,6 +46,8 @@ const range = {
   chain: z.uuid().optional(),
   rule: z.uuid().optional(),
   audience: z.enum(audiences).optional(),
+  /** Part of a store's number or name. */
+  q: z.string().trim().max(100).optional(),
 };
 
 const inOrder = (query: { from: Month; to: Month }, context: z.RefinementCtx) => {
@@ -121,13 +124,22 @@ export const readCompliancePicture = endpoint({
   }),
 });
 
-export const exportCompliance = endpoint({
+const named = z.strictObject({ id: z.uuid(), name: z.string() });
+
+/** The words for what can be filtered by; only what lies in the reader's sight. */
+export const readComplianceFilters = endpoint({
   method: 'GET',
-  path: '/compliance/export',
-  summary: 'The compliance table as CSV or XLSX',
+  path: '/compliance/filters',
+  summary: 'Chains, regions and rules to filter compliance by, and the name of one store',
   access: 'compliance.read',
-  query: z.strictObject({ ...table, format: z.enum(['csv', 'xlsx']) }).superRefine(inOrder),
-  reply: z.undefined(),
+  query: z.strictObject({ store: z.uuid().optional() }),
+  reply: z.strictObject({
+    chains: z.array(named),
+    regions: z.array(named),
+    rules: z.array(named),
+    /** The store that was asked for; null when none was, or it is out of sight. */
+    store: named.extend({ number: z.string() }).nullable(),
+  }),
 });
 
-export const complianceEndpoints = [readCompliance, readCompliancePicture, exportCompliance];
+export const complianceEndpoints = [readCompliance, readCompliancePicture, readComplianceFilters];
