@@ -10,6 +10,7 @@ import signInRoutes from './sign-in/sign-in.routes';
 const features: Routes = [
   { path: 'procedures', loadChildren: () => import('./procedures/procedures.routes') },
   { path: 'programmes', loadChildren: () => import('./programmes/programmes.routes') },
+  { path: 'findings', loadChildren: () => import('./findings/findings.routes') },
   { path: 'account', loadChildren: () => import('./sign-in/account.routes') },
 ];
 

@@ -25,6 +25,12 @@ export const navigation: readonly NavigationItem[] = [
     icon: 'procedure',
     anyOf: ['procedures.read'],
   },
+  {
+    path: 'findings',
+    label: $localize`:@@findings.title:Findings`,
+    icon: 'finding',
+    anyOf: ['findings.read'],
+  },
 ];
 
 /** Where each role starts, the broadest role of a person deciding. */
