@@ -11,6 +11,7 @@ import type { Routes } from './http/routes';
 import { uploadRoutes } from './uploads/upload-routes';
 import { todayRoutes } from './today/today-routes';
 import { signInRoutes } from './sign-in/sign-in-routes';
+import { visitRoutes } from './visits/visit-routes';
 
 /** The only file that lists every feature. */
 export function registerFeatures(routes: Routes): void {
@@ -20,6 +21,7 @@ export function registerFeatures(routes: Routes): void {
   programmesRoutes(routes);
   rulesRoutes(routes);
   inspectionRoutes(routes);
+  visitRoutes(routes);
   todayRoutes(routes);
   uploadRoutes(routes);
   shiftCheckRoutes(routes);

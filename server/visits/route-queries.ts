@@ -10,6 +10,7 @@ import { visibleStores } from '../access/visible-stores';
 import { type Position, distanceMetres } from '../fleet/locate-store';
 import { asPlannedTask, type PlannedTaskRow, plannedTaskRows, sumMinutes } from './planned-tasks';
 import { hoursOn, type Stop, stopColumn } from './stop-columns';
+import { techniciansFor } from './technicians';
 
 export type Route = z.output<typeof route>;
 export type Visit = z.output<typeof visit>;
@@ -71,8 +72,8 @@ export async function routesWhere(
   );
 }
 
-/** One route. @throws Problem 404 when there is none, or none with anything in the actor's sight */
-export async function routeById(
+/** One route as the actor sees it, after a change that they were allowed. */
+export async function plannedRoute(
   tenant: Tenant,
   actor: Actor,
   id: string,
@@ -84,30 +85,25 @@ export async function routeById(
     (binds) => visibleStores(actor, 'visits.plan', binds),
     now,
   );
-  if (!found || (found.visits.length === 0 && found.elsewhere > 0)) throw notFound('route');
+  if (!found) throw notFound('route');
   return found;
 }
 
 /**
- * The day of one technician as it was told to them: null when nothing has been published. A day that
- * was changed since says so by its state, and shows what it holds now.
- *
- * @param date `YYYY-MM-DD`, local to the stores of the day
+ * One route of somebody whom the actor may send, or with something on it that the actor plans.
+ * @throws Problem 404
  */
-export async function visitsOfDay(
+export async function routeById(
   tenant: Tenant,
-  technicianId: string,
-  date: string,
+  actor: Actor,
+  id: string,
   now: Date,
-): Promise<Route | null> {
-  const [found] = await routesWhere(
-    tenant,
-    (binds) => `ro.technician_id = ${binds.add(technicianId)}::uuid
-      AND ro.on_date = ${binds.add(date)}::date AND ro.published_version IS NOT NULL`,
-    () => 'true',
-    now,
-  );
-  return found ?? null;
+): Promise<Route> {
+  const found = await plannedRoute(tenant, actor, id, now);
+  if (found.visits.length > 0) return found;
+  const theirs = await techniciansFor(tenant, actor, { technician: found.technician.id });
+  if (theirs.length === 0) throw notFound('route');
+  return found;
 }
 
 function visitRows(
