@@ -31,6 +31,8 @@ export interface PublicCall<E> extends Input<E>, Services {
 
 type AnyEndpoint = Endpoint;
 
+const signedOut = () => new Problem(401, 'signed-out', 'Please sign in.');
+
 /**
  * Binds endpoints to handlers. A signed-in call is authenticated, validated and run in one
  * transaction of the actor's organisation, and a write that carries an idempotency key runs once.
@@ -48,6 +50,26 @@ export class Routes {
     this.bind(endpoint, async (req, res) => {
       const reply = await this.asActor(endpoint, req, (call) =>
         once(call, () => handler(call as Call<E>)),
+      );
+      this.send(endpoint, res, reply);
+    });
+  }
+
+  /**
+   * For a body that is no JSON: it is received before the transaction begins, so that a slow sender
+   * holds no connection to the database.
+   */
+  upload<E extends AnyEndpoint, R>(
+    endpoint: E,
+    receive: (req: Request) => Promise<R>,
+    handler: (call: Call<E> & { readonly received: R }) => Promise<ReplyOf<E> | void>,
+  ): void {
+    this.bind(endpoint, async (req, res) => {
+      // Whoever may not send one is told so before the first byte is read.
+      await this.asActor(endpoint, req, async () => undefined);
+      const received = await receive(req);
+      const reply = await this.asActor(endpoint, req, (call) =>
+        handler({ ...(call as Call<E>), received }),
       );
       this.send(endpoint, res, reply);
     });
@@ -84,7 +106,7 @@ export class Routes {
     req: Request,
     work: (call: Call<AnyEndpoint>) => Promise<T>,
   ): Promise<T> {
-    if (!req.user) throw new Problem(401, 'signed-out', 'Please sign in.');
+    if (!req.user) throw signedOut();
     const { personId, organisationId } = req.user;
     return inTenant(this.services.sequelize, organisationId, async (tenant) => {
       const actor = await loadActor(tenant, personId);
