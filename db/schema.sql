@@ -631,6 +631,7 @@ CREATE TABLE public.uploads (
     id uuid NOT NULL,
     organisation_id uuid NOT NULL,
     purpose text NOT NULL,
+    store_id uuid,
     storage_key text NOT NULL,
     thumbnail_key text,
     content_type text NOT NULL,
@@ -639,6 +640,7 @@ CREATE TABLE public.uploads (
     height integer,
     uploaded_by uuid NOT NULL,
     uploaded_at timestamp with time zone DEFAULT now() NOT NULL,
+    CONSTRAINT uploads_check CHECK (((purpose <> 'photo'::text) OR ((store_id IS NOT NULL) AND (thumbnail_key IS NOT NULL) AND (width > 0) AND (height > 0)))),
     CONSTRAINT uploads_purpose_check CHECK ((purpose = ANY (ARRAY['photo'::text, 'import'::text])))
 );
 
@@ -902,6 +904,8 @@ CREATE INDEX tasks_visit_id_idx ON ONLY public.tasks USING btree (visit_id) WHER
 
 CREATE INDEX tasks_beyond_visit_id_idx ON public.tasks_beyond USING btree (visit_id) WHERE (visit_id IS NOT NULL);
 
+CREATE INDEX uploads_uploaded_by_uploaded_at_idx ON public.uploads USING btree (uploaded_by, uploaded_at);
+
 CREATE INDEX visits_store_id_idx ON public.visits USING btree (store_id);
 
 ALTER INDEX public.tasks_assigned_to_due_on_idx ATTACH PARTITION public.tasks_beyond_assigned_to_due_on_idx;
@@ -1150,6 +1154,9 @@ ALTER TABLE ONLY public.units
 
 ALTER TABLE ONLY public.uploads
     ADD CONSTRAINT uploads_organisation_id_fkey FOREIGN KEY (organisation_id) REFERENCES public.organisations(id);
+
+ALTER TABLE ONLY public.uploads
+    ADD CONSTRAINT uploads_store_id_fkey FOREIGN KEY (store_id) REFERENCES public.stores(id);
 
 ALTER TABLE ONLY public.uploads
     ADD CONSTRAINT uploads_uploaded_by_fkey FOREIGN KEY (uploaded_by) REFERENCES public.people(id);

@@ -10,6 +10,8 @@ export const createInspections = sqlMigration(
       id uuid PRIMARY KEY,
       organisation_id uuid NOT NULL REFERENCES organisations,
       purpose text NOT NULL CHECK (purpose IN ('photo', 'import')),
+      -- A photo shows one store, and whoever sees that store sees it.
+      store_id uuid REFERENCES stores,
       storage_key text NOT NULL UNIQUE,
       thumbnail_key text,
       content_type text NOT NULL,
@@ -17,8 +19,11 @@ export const createInspections = sqlMigration(
       width integer,
       height integer,
       uploaded_by uuid NOT NULL REFERENCES people,
-      uploaded_at timestamptz NOT NULL DEFAULT now()
+      uploaded_at timestamptz NOT NULL DEFAULT now(),
+      CHECK (purpose <> 'photo'
+        OR (store_id IS NOT NULL AND thumbnail_key IS NOT NULL AND width > 0 AND height > 0))
     );
+    CREATE INDEX ON uploads (uploaded_by, uploaded_at);
     CREATE TABLE inspections (
       id uuid PRIMARY KEY,
       organisation_id uuid NOT NULL REFERENCES organisations,

@@ -13,6 +13,7 @@ import type { TaskState } from '@shared/tasks/task-state';
 import type { Tenant } from '@db/tenant-transaction';
 import type { Actor } from '../access/actor';
 import { recordEvent } from '../audit/record-event';
+import { photoFaults } from '../uploads/photo-faults';
 import { readingFaults } from './check-readings';
 import { mayCloseTask } from './inspection-policy';
 import { nameplatesOf, unknownNameplate } from './sheet-parts';
@@ -56,7 +57,10 @@ export async function closeTask(
       { field: 'procedureVersionId', reason: 'unknown', message: 'This is another procedure.' },
     ]);
   }
-  const faults = readingFaults(version.content, draft.readings);
+  const faults = [
+    ...readingFaults(version.content, draft.readings),
+    ...(await photoFaults(tenant, row.storeId, photoFields(draft))),
+  ];
   if (faults.length > 0) throw invalid(faults);
 
   const nameplates = await nameplatesOf(tenant, row.unitId ? [row.unitId] : []);
@@ -95,6 +99,17 @@ export async function closeTask(
     detail: { inspectionId: draft.id, findings },
   });
   return { state: now < row.closesAt ? 'done' : 'done-late', findings };
+}
+
+/** The step that each photo was taken for. */
+function photoFields(draft: InspectionDraft): Map<string, string> {
+  return new Map(
+    draft.readings.flatMap((reading) =>
+      reading.kind === 'photo'
+        ? reading.photoIds.map((id) => [id, `readings.${reading.step}`] as const)
+        : [],
+    ),
+  );
 }
 
 /** A closed window whose outcome changes must be counted again. */
