@@ -8,6 +8,10 @@ import signInRoutes from './sign-in/sign-in.routes';
  * routes by default. What the navigation shows of them stands in `shell/navigation.ts`.
  */
 const features: Routes = [
+  { path: 'fleet', loadChildren: () => import('./fleet/fleet.routes') },
+  // Short addresses for letters, labels and links from other features.
+  { path: 'stores/:id', redirectTo: 'fleet/stores/:id' },
+  { path: 'units/:id', redirectTo: 'fleet/units/:id' },
   { path: 'procedures', loadChildren: () => import('./procedures/procedures.routes') },
   { path: 'programmes', loadChildren: () => import('./programmes/programmes.routes') },
   { path: 'findings', loadChildren: () => import('./findings/findings.routes') },

@@ -14,6 +14,12 @@ export interface NavigationItem {
 /** In the order in which they stand in the header; what does not fit goes under "More". */
 export const navigation: readonly NavigationItem[] = [
   {
+    path: 'fleet',
+    label: $localize`:@@fleet.title:Fleet`,
+    icon: 'store',
+    anyOf: ['fleet.read'],
+  },
+  {
     path: 'programmes',
     label: $localize`:@@programmes.title:Programmes`,
     icon: 'programme',
@@ -41,7 +47,7 @@ const starts: readonly (readonly [Role, string])[] = [
   ['shift-lead', 'shift'],
   ['account-owner', 'digests'],
   ['trainer', 'procedures'],
-  ['administrator', 'stores'],
+  ['administrator', 'fleet'],
 ];
 
 /**
