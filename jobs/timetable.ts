@@ -1,4 +1,5 @@
 import { rollUpCompliance } from './compliance/roll-up';
+import { makeDigests } from './digests/make-digests';
 import { queueReminders } from './mail/queue-reminders';
 import { sendLetters } from './mail/send-letters';
 import type { WorkerServices } from './services';
@@ -18,5 +19,6 @@ const minutes = (count: number) => count * 60;
 export const timetable: readonly Job[] = [
   { name: 'roll-up-compliance', everySeconds: minutes(5), run: rollUpCompliance },
   { name: 'queue-reminders', everySeconds: minutes(5), run: queueReminders },
+  { name: 'make-digests', everySeconds: minutes(15), run: makeDigests },
   { name: 'send-letters', everySeconds: 10, run: (services) => sendLetters(services) },
 ];

@@ -133,6 +133,7 @@ function months({ content, locale }: Writing): Block[] {
 
 function stores({ content, locale, mostRows }: Writing): Block[] {
   const its = digestWords[locale];
+  if (content.stores.length === 0) return [];
   return [
     { kind: 'heading', text: its.stores },
     {

@@ -1,9 +1,9 @@
 import { digestBlocks } from '@shared/digests/digest-blocks';
 import type { DigestContent } from '@shared/digests/digest-content';
+import { digestSample } from '@shared/digests/digest-sample';
 import { digestWords } from '@shared/digests/digest-words';
 import { formatCount, formatMonth, formatRate } from '@shared/mail/format-moment';
 import type { MailMessage } from '../mail-message';
-import { digestSample } from './digest-sample';
 
 export interface DigestMessageContent {
   readonly digestId: string;

@@ -1,5 +1,5 @@
-import { onTimeRate, type WindowCounts } from '@shared/compliance/on-time-rate';
-import type { DigestContent } from '@shared/digests/digest-content';
+import { onTimeRate, type WindowCounts } from '../compliance/on-time-rate';
+import type { DigestContent } from './digest-content';
 
 const counts = (onTime: number, late: number, notDone: number, excused = 0, covered = 0) => {
   const all: WindowCounts = { onTime, late, notDone, excused, covered };
