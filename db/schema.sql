@@ -884,9 +884,9 @@ CREATE INDEX tasks_closes_at_idx ON ONLY public.tasks USING btree (closes_at) WH
 
 CREATE INDEX tasks_beyond_closes_at_idx ON public.tasks_beyond USING btree (closes_at) WHERE (outcome = 'none'::text);
 
-CREATE INDEX tasks_organisation_id_due_on_id_idx ON ONLY public.tasks USING btree (organisation_id, due_on, id);
+CREATE INDEX tasks_organisation_id_due_on_due_at_id_idx ON ONLY public.tasks USING btree (organisation_id, due_on, due_at, id);
 
-CREATE INDEX tasks_beyond_organisation_id_due_on_id_idx ON public.tasks_beyond USING btree (organisation_id, due_on, id);
+CREATE INDEX tasks_beyond_organisation_id_due_on_due_at_id_idx ON public.tasks_beyond USING btree (organisation_id, due_on, due_at, id);
 
 CREATE INDEX tasks_store_id_closes_on_idx ON ONLY public.tasks USING btree (store_id, closes_on);
 
@@ -912,7 +912,7 @@ ALTER INDEX public.tasks_assigned_to_due_on_idx ATTACH PARTITION public.tasks_be
 
 ALTER INDEX public.tasks_closes_at_idx ATTACH PARTITION public.tasks_beyond_closes_at_idx;
 
-ALTER INDEX public.tasks_organisation_id_due_on_id_idx ATTACH PARTITION public.tasks_beyond_organisation_id_due_on_id_idx;
+ALTER INDEX public.tasks_organisation_id_due_on_due_at_id_idx ATTACH PARTITION public.tasks_beyond_organisation_id_due_on_due_at_id_idx;
 
 ALTER INDEX public.tasks_pkey ATTACH PARTITION public.tasks_beyond_pkey;
 

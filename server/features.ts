@@ -6,8 +6,8 @@ import { proceduresRoutes } from './procedures/procedures-routes';
 import { programmesRoutes } from './programmes/programmes-routes';
 import { rulesRoutes } from './programmes/rules-routes';
 import { complianceRoutes } from './compliance/compliance-routes';
-import { digestRoutes } from './digests/digest-routes';
 import { mailRoutes } from './mail/mail-routes';
+import { tasksRoutes } from './tasks/tasks-routes';
 import type { Routes } from './http/routes';
 import { uploadRoutes } from './uploads/upload-routes';
 import { todayRoutes } from './today/today-routes';
@@ -28,6 +28,6 @@ export function registerFeatures(routes: Routes): void {
   shiftCheckRoutes(routes);
   findingRoutes(routes);
   complianceRoutes(routes);
-  digestRoutes(routes);
   mailRoutes(routes);
+  tasksRoutes(routes);
 }

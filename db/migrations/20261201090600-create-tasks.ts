@@ -44,7 +44,7 @@ export const createTasks = sqlMigration(
       CHECK ((outcome = 'none') = (outcome_at IS NULL))
     ) PARTITION BY RANGE (occurs_local);
     CREATE INDEX ON tasks (store_id, due_on);
-    CREATE INDEX ON tasks (organisation_id, due_on, id);
+    CREATE INDEX ON tasks (organisation_id, due_on, due_at, id);
     CREATE INDEX ON tasks (unit_id, due_on) WHERE unit_id IS NOT NULL;
     CREATE INDEX ON tasks (assigned_to, due_on) WHERE assigned_to IS NOT NULL;
     CREATE INDEX ON tasks (visit_id) WHERE visit_id IS NOT NULL;

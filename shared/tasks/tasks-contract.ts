@@ -147,7 +147,7 @@ export const readTaskBoard = endpoint({
       overdue: z.int(),
       /** The last day on which the oldest overdue task was on time. */
       oldestOverdueOn: date.nullable(),
-      /** Not done yet and due by the end of this week, a Sunday. */
+      /** Not decided yet and due from today to the end of this week, a Sunday. */
       dueThisWeek: z.int(),
     }),
   }),
