@@ -312,6 +312,7 @@ CREATE TABLE public.people (
     email text,
     locale text DEFAULT 'en'::text NOT NULL,
     time_zone text NOT NULL,
+    home_postal_code text,
     home_latitude double precision,
     home_longitude double precision,
     password_hash text,

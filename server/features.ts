@@ -11,12 +11,14 @@ import { tasksRoutes } from './tasks/tasks-routes';
 import type { Routes } from './http/routes';
 import { uploadRoutes } from './uploads/upload-routes';
 import { todayRoutes } from './today/today-routes';
+import { peopleRoutes } from './people/people-routes';
 import { signInRoutes } from './sign-in/sign-in-routes';
 import { visitRoutes } from './visits/visit-routes';
 
 /** The only file that lists every feature. */
 export function registerFeatures(routes: Routes): void {
   signInRoutes(routes);
+  peopleRoutes(routes);
   fleetRoutes(routes);
   proceduresRoutes(routes);
   programmesRoutes(routes);

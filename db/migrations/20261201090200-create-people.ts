@@ -11,6 +11,8 @@ export const createPeople = sqlMigration(
       email text CHECK (email = lower(email)),
       locale text NOT NULL DEFAULT 'en' CHECK (locale IN ('en', 'es')),
       time_zone text NOT NULL,
+      -- What a technician's days begin at is kept as coarse as it was said: a ZIP code's middle.
+      home_postal_code text,
       home_latitude double precision CHECK (home_latitude BETWEEN -90 AND 90),
       home_longitude double precision CHECK (home_longitude BETWEEN -180 AND 180),
       password_hash text,

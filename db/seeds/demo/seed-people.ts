@@ -64,6 +64,7 @@ export async function seedPeople(
         email: person.email,
         locale: person.locale ?? 'en',
         time_zone: timeZone,
+        home_postal_code: person.homePostalCode ?? null,
         home_latitude: home?.latitude ?? null,
         home_longitude: home?.longitude ?? null,
         password_hash: hash,
