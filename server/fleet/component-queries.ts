@@ -9,6 +9,7 @@ import { Binds } from '@db/binds';
 import type { Tenant } from '@db/tenant-transaction';
 import type { Actor } from '../access/actor';
 import { visibleStores } from '../access/visible-stores';
+import { cursorBatches } from '../exports/read-batches';
 import { type StorePlace, mayEditAt } from './fleet-policy';
 import { bothWays, naturalOrder, searchText } from './search-text';
 
@@ -76,17 +77,22 @@ export async function pageOfComponents(
   return { rows, total: count?.total ?? 0, page, pageSize };
 }
 
+export type ComponentFileRow = ComponentRow & { readonly chainName: string };
+
 /** All parts of a list, for a file. */
-export async function componentsForFile(
+export function componentsForFile(
   tenant: Tenant,
   actor: Actor,
   filters: Filters,
-): Promise<ComponentRow[]> {
+): AsyncIterable<ComponentFileRow[]> {
   const binds = new Binds();
   const where = conditions(actor, filters, binds);
-  return tenant.rows<ComponentRow>(
-    `SELECT ${listColumns} ${from} WHERE ${where} ORDER BY ${sorts[filters.sort]}`,
+  return cursorBatches(
+    tenant,
+    `SELECT ${listColumns}, c.name AS "chainName" ${from} JOIN chains c ON c.id = s.chain_id
+     WHERE ${where} ORDER BY ${sorts[filters.sort]}`,
     binds.values,
+    (row: ComponentFileRow) => row,
   );
 }
 

@@ -1,7 +1,9 @@
 import * as contract from '@shared/fleet/components-contract';
 import type { Routes } from '../http/routes';
-import { componentById, pageOfComponents } from './component-queries';
+import { exportTable } from '../exports/export-table';
+import { componentById, componentsForFile, pageOfComponents } from './component-queries';
 import { editComponent } from './edit-component';
+import { componentColumns } from './export-columns';
 import { installComponent } from './install-component';
 import { removeComponent } from './remove-component';
 import { replaceComponent } from './replace-component';
@@ -10,6 +12,18 @@ import { undoRemoval } from './undo-removal';
 export function componentRoutes(routes: Routes): void {
   routes.on(contract.listComponents, ({ tenant, actor, query }) =>
     pageOfComponents(tenant, actor, query),
+  );
+
+  routes.download(
+    contract.exportComponents,
+    async ({ tenant, actor, query: { format, ...filters }, now }) =>
+      exportTable(actor, {
+        name: { en: 'parts', es: 'piezas' },
+        format,
+        columns: componentColumns,
+        batches: componentsForFile(tenant, actor, filters),
+        now: now(),
+      }),
   );
 
   routes.on(contract.installComponent, async ({ tenant, actor, params, body, now }) => {

@@ -1,13 +1,18 @@
 import * as contract from '@shared/fleet/groups-contract';
 import type { Routes } from '../http/routes';
+import { exportTable } from '../exports/export-table';
+import { pageBatches } from '../exports/read-batches';
 import { createGroup } from './create-group';
 import { editGroup } from './edit-group';
+import { groupColumns } from './export-columns';
 import { type GroupKind, groupById, pageOfGroups } from './group-queries';
 import { setGroupRetired } from './set-group-retired';
 
 const ofKind = {
   chain: {
     list: contract.listChains,
+    file: contract.exportChains,
+    name: { en: 'chains', es: 'cadenas' },
     create: contract.createChain,
     edit: contract.editChain,
     retire: contract.retireChain,
@@ -15,6 +20,8 @@ const ofKind = {
   },
   region: {
     list: contract.listRegions,
+    file: contract.exportRegions,
+    name: { en: 'regions', es: 'regiones' },
     create: contract.createRegion,
     edit: contract.editRegion,
     retire: contract.retireRegion,
@@ -24,9 +31,21 @@ const ofKind = {
 
 /** Chains and regions: the same calls on either. */
 export function groupRoutes(routes: Routes, kind: GroupKind): void {
-  const { list, create, edit, retire, restore } = ofKind[kind];
+  const { list, file, name, create, edit, retire, restore } = ofKind[kind];
 
   routes.on(list, ({ tenant, actor, query }) => pageOfGroups(tenant, actor, kind, query));
+
+  routes.download(file, async ({ tenant, actor, query: { format, ...filters }, now }) =>
+    exportTable(actor, {
+      name,
+      format,
+      columns: groupColumns(kind),
+      batches: pageBatches((page, pageSize) =>
+        pageOfGroups(tenant, actor, kind, { ...filters, page, pageSize }),
+      ),
+      now: now(),
+    }),
+  );
 
   routes.on(create, async ({ tenant, actor, body }) => {
     await createGroup(tenant, actor, kind, body);

@@ -6,6 +6,7 @@ import { Binds } from '@db/binds';
 import type { Tenant } from '@db/tenant-transaction';
 import type { Actor } from '../access/actor';
 import { visibleStores } from '../access/visible-stores';
+import { cursorBatches } from '../exports/read-batches';
 import { mayEditAt } from './fleet-policy';
 import { timeZoneAt } from './locate-store';
 import { bothWays, naturalOrder, searchText } from './search-text';
@@ -90,17 +91,21 @@ export async function pageOfStores(
   return { rows: rows.map(presentRow), total: count?.total ?? 0, page, pageSize };
 }
 
+export type StoreFileRow = Omit<FullRow, 'hours'> & { readonly hours: StoreHours };
+
 /** All stores of a list with all that is known of them, for a file. */
-export async function storesForFile(
+export function storesForFile(
   tenant: Tenant,
   actor: Actor,
   filters: Filters,
-): Promise<FullRow[]> {
+): AsyncIterable<StoreFileRow[]> {
   const binds = new Binds();
   const where = conditions(actor, filters, binds);
-  return tenant.rows<FullRow>(
+  return cursorBatches(
+    tenant,
     `SELECT ${columns}, ${more} ${from} WHERE ${where} ORDER BY ${sorts[filters.sort]}`,
     binds.values,
+    (row: FullRow) => ({ ...row, hours: { ...unknownHours, ...row.hours } }),
   );
 }
 

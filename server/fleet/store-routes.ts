@@ -1,13 +1,27 @@
 import * as contract from '@shared/fleet/stores-contract';
 import type { Routes } from '../http/routes';
+import { exportTable } from '../exports/export-table';
 import { createStore } from './create-store';
 import { editStore } from './edit-store';
+import { storeColumns } from './export-columns';
 import { findPlace } from './find-place';
 import { setStoreRetired } from './set-store-retired';
-import { pageOfStores, storeById } from './store-queries';
+import { pageOfStores, storeById, storesForFile } from './store-queries';
 
 export function storeRoutes(routes: Routes): void {
   routes.on(contract.listStores, ({ tenant, actor, query }) => pageOfStores(tenant, actor, query));
+
+  routes.download(
+    contract.exportStores,
+    async ({ tenant, actor, query: { format, ...filters }, now }) =>
+      exportTable(actor, {
+        name: { en: 'stores', es: 'locales' },
+        format,
+        columns: storeColumns,
+        batches: storesForFile(tenant, actor, filters),
+        now: now(),
+      }),
+  );
 
   routes.on(contract.locateStore, async ({ query }) => ({ place: findPlace(query) }));
 

@@ -26,7 +26,7 @@ const lastInspectedAt = `(SELECT max(i.finished_at) FROM inspections i
 const openFindings = `(SELECT count(*)::int FROM findings f
   WHERE f.unit_id = u.id AND f.settled_at IS NULL)`;
 
-const columns = `
+export const unitColumns = `
   u.id, u.tag, u.kind, u.vats, u.oil_pounds::float8 AS "oilPounds", u.model,
   u.installed_on AS "installedOn", u.out_of_service_since AS "outOfServiceSince",
   u.retired_at AS "retiredAt", u.store_id AS "storeId", s.number AS "storeNumber",
@@ -104,7 +104,7 @@ export async function pageOfUnits(
     binds.values,
   );
   const rows = await tenant.rows<ListRow>(
-    `SELECT ${columns} ${unitsFrom} WHERE ${where} ORDER BY ${unitSorts[query.sort]}
+    `SELECT ${unitColumns} ${unitsFrom} WHERE ${where} ORDER BY ${unitSorts[query.sort]}
      LIMIT ${binds.add(pageSize)} OFFSET ${binds.add((page - 1) * pageSize)}`,
     binds.values,
   );
@@ -115,7 +115,7 @@ export async function pageOfUnits(
 export async function unitById(tenant: Tenant, actor: Actor, id: string): Promise<Unit> {
   const binds = new Binds();
   const row = await tenant.row<FullRow>(
-    `SELECT ${columns}, s.chain_id AS "chainId", s.region_id AS "regionId", u.version,
+    `SELECT ${unitColumns}, s.chain_id AS "chainId", s.region_id AS "regionId", u.version,
        s.retired_at AS "storeRetiredAt"
      ${unitsFrom} WHERE ${visibleStores(actor, 'fleet.read', binds)} AND u.id = ${binds.add(id)}`,
     binds.values,

@@ -1,13 +1,28 @@
 import * as contract from '@shared/fleet/units-contract';
 import type { Routes } from '../http/routes';
+import { exportTable } from '../exports/export-table';
 import { createUnit } from './create-unit';
 import { editUnit } from './edit-unit';
+import { unitFileColumns } from './export-columns';
 import { setUnitRetired } from './set-unit-retired';
+import { unitsForFile } from './unit-file';
 import { unitLife } from './unit-life';
 import { pageOfUnits, unitById } from './unit-queries';
 
 export function unitRoutes(routes: Routes): void {
   routes.on(contract.listUnits, ({ tenant, actor, query }) => pageOfUnits(tenant, actor, query));
+
+  routes.download(
+    contract.exportUnits,
+    async ({ tenant, actor, query: { format, ...filters }, now }) =>
+      exportTable(actor, {
+        name: { en: 'units', es: 'equipos' },
+        format,
+        columns: unitFileColumns,
+        batches: unitsForFile(tenant, actor, filters),
+        now: now(),
+      }),
+  );
 
   routes.on(contract.readUnit, ({ tenant, actor, params }) => unitById(tenant, actor, params.id));
 
