@@ -1,12 +1,16 @@
 import type { Sequelize } from 'sequelize';
 import { type CalendarDate, addDays, addMonths } from '@shared/calendar/calendar-date';
 import { inTenant } from '@db/tenant-transaction';
+import { generateTasks } from '@server/tasks/generate-tasks';
+import { countClosedWindows } from '@server/compliance/count-closed-windows';
+import { seedHistory } from '../history/seed-history';
 import { makeWorld } from '../world/fleet';
 import { organisation } from '../world/places';
 import { namedId, seededRandom } from '../world/random';
 import { seedFleet } from './seed-fleet';
 import { actorOf, seedPeople } from './seed-people';
 import { seedProgrammes } from './seed-programmes';
+import { seedVisits } from './seed-visits';
 
 const SEED = 20_260_301;
 const MONTHS_OF_HISTORY = 18;
@@ -29,12 +33,19 @@ export async function makeDemoWorld(owner: Sequelize, app: Sequelize, now: Date)
     bind: [addDays(first, -31), addMonths(today, 14)],
   });
   const world = makeWorld(random, today);
-  await inTenant(app, organisationId, async (tenant) => {
+  const staff = await inTenant(app, organisationId, async (tenant) => {
     await seedFleet(tenant, world);
     const staff = await seedPeople(tenant, world, random);
     const [administrator, trainer] = staff;
     if (!administrator || !trainer) throw new Error('The demo world has nobody to act.');
     const founder = actorOf(tenant, administrator, [administrator.grant, trainer.grant]);
     await seedProgrammes(tenant, founder, world.chainIds, first, random);
+    return staff;
+  });
+  await generateTasks(app, organisationId, now);
+  await inTenant(app, organisationId, async (tenant) => {
+    await seedHistory(tenant, world, staff, first, random, now);
+    await seedVisits(tenant, staff, random, now);
+    await countClosedWindows(tenant, now);
   });
 }

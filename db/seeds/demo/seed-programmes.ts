@@ -62,7 +62,7 @@ const drafts: readonly Draft[] = [
     pumpFace: 'drain-slot',
     rrule: 'FREQ=MONTHLY;BYDAY=2WE',
     time: '09:00:00',
-    window: days(3, 3, 10, 3),
+    window: days(3, 3, 18, 3),
     rank: 1,
   },
   {
@@ -72,7 +72,7 @@ const drafts: readonly Draft[] = [
     appliesTo: 'unit',
     rrule: 'FREQ=MONTHLY;BYDAY=3TU',
     time: '09:00:00',
-    window: days(3, 3, 10, 3),
+    window: days(3, 3, 20, 3),
     rank: 1,
   },
   {
