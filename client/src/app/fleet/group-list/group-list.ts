@@ -79,7 +79,7 @@ export class GroupList {
       .map(({ label }) => ({ key: 'state', label })),
   );
   protected readonly words = wordsOf(this.kind);
-  protected readonly columns: readonly TableColumn<Group>[] = [
+  protected readonly columns = computed<readonly TableColumn<Group>[]>(() => [
     { key: 'name', label: $localize`:@@fleet.name:Name`, sort: 'name' },
     {
       key: 'stores',
@@ -95,8 +95,17 @@ export class GroupList {
       align: 'end',
       text: (row) => row.units,
     },
-    { key: 'acts', label: $localize`:@@fleet.acts:Change`, align: 'end', phone: 'aside' },
-  ];
+    ...(this.mayAdd()
+      ? [
+          {
+            key: 'acts',
+            label: $localize`:@@fleet.acts:Change`,
+            align: 'end' as const,
+            phone: 'aside' as const,
+          },
+        ]
+      : []),
+  ]);
   protected readonly id = (row: Group): string => row.id;
 
   protected storesOf(row: Group): Record<string, string> {

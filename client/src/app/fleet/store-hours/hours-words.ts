@@ -35,3 +35,18 @@ export function rushWords(day: DayHours | null, locale: string): string {
     .map(({ from, to }) => `${clockWords(from, locale)} – ${clockWords(to, locale)}`)
     .join(', ');
 }
+
+/** The week in runs of days, one after the other, that have the same hours. */
+export function runsOfDays(
+  hours: StoreHours,
+): readonly { first: WeekdayCode; last: WeekdayCode; day: DayHours | null }[] {
+  const runs: { first: WeekdayCode; last: WeekdayCode; day: DayHours | null; key: string }[] = [];
+  for (const code of weekdays) {
+    const day = dayOf(hours, code);
+    const key = JSON.stringify(day && [day.open, day.close, day.rush]);
+    const before = runs.at(-1);
+    if (before?.key === key) before.last = code;
+    else runs.push({ first: code, last: code, day, key });
+  }
+  return runs;
+}

@@ -6,9 +6,9 @@ import {
   input,
   LOCALE_ID,
 } from '@angular/core';
-import type { StoreHours } from '@shared/fleet/store-hours';
+import type { StoreHours, WeekdayCode } from '@shared/fleet/store-hours';
 import { daySpans } from './day-spans';
-import { dayOf, openWords, rushWords, weekdayName, weekdays } from './hours-words';
+import { openWords, runsOfDays, rushWords, weekdayName } from './hours-words';
 
 /** A store's week: a bar per day, open hours in steel, rush windows across them in amber. */
 @Component({
@@ -46,7 +46,7 @@ import { dayOf, openWords, rushWords, weekdayName, weekdays } from './hours-word
     }
     .day {
       display: grid;
-      grid-template-columns: 3.2rem 1fr;
+      grid-template-columns: 5.5rem 1fr;
       gap: var(--vw-space-2);
       align-items: start;
     }
@@ -88,16 +88,19 @@ export class WeekHours {
 
   readonly hours = input.required<StoreHours>();
 
+  /** Days that follow one another with the same hours stand as one. */
   protected readonly days = computed(() =>
-    weekdays.map((code) => {
-      const day = dayOf(this.hours(), code);
-      return {
-        code,
-        name: weekdayName(code, this.locale, 'short'),
-        spans: daySpans(day),
-        open: openWords(day, this.locale),
-        rush: rushWords(day, this.locale),
-      };
-    }),
+    runsOfDays(this.hours()).map(({ first, last, day }) => ({
+      code: first,
+      name: this.nameOf(first, last),
+      spans: daySpans(day),
+      open: openWords(day, this.locale),
+      rush: rushWords(day, this.locale),
+    })),
   );
+
+  private nameOf(first: WeekdayCode, last: WeekdayCode): string {
+    const from = weekdayName(first, this.locale, 'short');
+    return first === last ? from : `${from} – ${weekdayName(last, this.locale, 'short')}`;
+  }
 }

@@ -92,6 +92,9 @@ import { UnitApi } from '../unit-api';
   `,
   styleUrl: '../fleet-list.scss',
   styles: `
+    vw-data-table {
+      --vw-table-above: 200px;
+    }
     .head {
       display: flex;
       align-items: center;
@@ -125,8 +128,8 @@ export class StoreUnits {
       text: (row) => unitKindWords[row.kind][this.language],
     },
     { key: 'vats', label: $localize`:@@fleet.vats:Vats`, align: 'end', text: (row) => row.vats },
-    { key: 'pump', label: $localize`:@@fleet.pump-since:Pump since`, choice: 'on' },
-    { key: 'inspected', label: $localize`:@@fleet.last-inspected:Last inspected`, choice: 'on' },
+    { key: 'pump', label: $localize`:@@fleet.pump-since:Pump since` },
+    { key: 'inspected', label: $localize`:@@fleet.last-inspected:Last inspected` },
     {
       key: 'findings',
       label: $localize`:@@fleet.open-findings:Open findings`,

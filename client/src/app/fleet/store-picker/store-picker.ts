@@ -75,11 +75,7 @@ export class StorePicker {
   /** Title of the store that the control holds at the beginning. */
   readonly initial = input('');
 
-  protected readonly text = new FormControl<StoreRow | string>('', {
-    nonNullable: true,
-    // The fault belongs to the control given; the field has to know of it to show it.
-    validators: [() => this.control().errors],
-  });
+  protected readonly text = new FormControl<StoreRow | string>('', { nonNullable: true });
   protected readonly stores = toSignal(
     this.text.valueChanges.pipe(
       tap((typed) => {
@@ -102,6 +98,8 @@ export class StorePicker {
   constructor() {
     effect((onCleanup) => {
       const control = this.control();
+      // The fault belongs to the control given; the field has to know of it to show it.
+      this.text.setValidators(() => control.errors);
       this.text.setValue(this.initial(), { emitEvent: false });
       const watching = control.events.subscribe(() => {
         this.text.updateValueAndValidity({ emitEvent: false });
