@@ -7,6 +7,7 @@ import { seedHistory } from '../history/seed-history';
 import { makeWorld } from '../world/fleet';
 import { organisation } from '../world/places';
 import { namedId, seededRandom } from '../world/random';
+import { seedDigests } from './seed-digests';
 import { seedFleet } from './seed-fleet';
 import { actorOf, seedPeople } from './seed-people';
 import { seedProgrammes } from './seed-programmes';
@@ -20,8 +21,14 @@ const MONTHS_OF_HISTORY = 18;
  * the same day gives the same world.
  * @param owner as the tables' owner, for the organisation's own row alone
  * @param app as the application, for everything within it
+ * @param baseUrl where links in letters lead
  */
-export async function makeDemoWorld(owner: Sequelize, app: Sequelize, now: Date): Promise<void> {
+export async function makeDemoWorld(
+  owner: Sequelize,
+  app: Sequelize,
+  baseUrl: string,
+  now: Date,
+): Promise<void> {
   const random = seededRandom(SEED);
   const today = now.toISOString().slice(0, 10) as CalendarDate;
   const first = `${addMonths(today, -MONTHS_OF_HISTORY).slice(0, 7)}-01` as CalendarDate;
@@ -47,5 +54,6 @@ export async function makeDemoWorld(owner: Sequelize, app: Sequelize, now: Date)
     await seedHistory(tenant, world, staff, first, random, now);
     await seedVisits(tenant, staff, random, now);
     await countClosedWindows(tenant, now);
+    await seedDigests(tenant, world.chainIds, baseUrl, now);
   });
 }

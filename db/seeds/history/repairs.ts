@@ -14,7 +14,7 @@ const DAY = 86_400_000;
 /** Days until it is settled, from a chance between 0 and 1: most soon, some very late. */
 const waits: Readonly<Record<Severity, (chance: number) => number>> = {
   stop: (chance) => 1 + 2 * chance,
-  plan: (chance) => 5 + 45 * chance * chance,
+  plan: (chance) => 6 + 60 * chance * chance,
   watch: (chance) => 25 + 90 * chance,
 };
 
