@@ -468,6 +468,8 @@ CREATE TABLE public.saved_views (
     page text NOT NULL,
     name text NOT NULL,
     query text NOT NULL,
+    shared boolean DEFAULT false NOT NULL,
+    version integer DEFAULT 0 NOT NULL,
     CONSTRAINT saved_views_name_check CHECK ((name <> ''::text))
 );
 
@@ -523,6 +525,18 @@ CREATE TABLE public.stores (
     CONSTRAINT stores_name_check CHECK ((name <> ''::text)),
     CONSTRAINT stores_number_check CHECK ((number <> ''::text)),
     CONSTRAINT stores_position_from_check CHECK ((position_from = ANY (ARRAY['coordinates'::text, 'postal-code'::text])))
+);
+
+CREATE TABLE public.task_changes (
+    id uuid NOT NULL,
+    organisation_id uuid NOT NULL,
+    person_id uuid NOT NULL,
+    kind text NOT NULL,
+    made_at timestamp with time zone NOT NULL,
+    results jsonb NOT NULL,
+    before jsonb NOT NULL,
+    undone_at timestamp with time zone,
+    CONSTRAINT task_changes_kind_check CHECK ((kind = ANY (ARRAY['assign'::text, 'excuse'::text, 'defer'::text])))
 );
 
 CREATE TABLE public.task_notices (
@@ -789,6 +803,9 @@ ALTER TABLE ONLY public.stores
 
 ALTER TABLE ONLY public.stores
     ADD CONSTRAINT stores_pkey PRIMARY KEY (id);
+
+ALTER TABLE ONLY public.task_changes
+    ADD CONSTRAINT task_changes_pkey PRIMARY KEY (id);
 
 ALTER TABLE ONLY public.task_notices
     ADD CONSTRAINT task_notices_pkey PRIMARY KEY (person_id, task_id, kind);
@@ -1138,6 +1155,12 @@ ALTER TABLE ONLY public.stores
 ALTER TABLE ONLY public.stores
     ADD CONSTRAINT stores_region_id_fkey FOREIGN KEY (region_id) REFERENCES public.regions(id);
 
+ALTER TABLE ONLY public.task_changes
+    ADD CONSTRAINT task_changes_organisation_id_fkey FOREIGN KEY (organisation_id) REFERENCES public.organisations(id);
+
+ALTER TABLE ONLY public.task_changes
+    ADD CONSTRAINT task_changes_person_id_fkey FOREIGN KEY (person_id) REFERENCES public.people(id);
+
 ALTER TABLE ONLY public.task_notices
     ADD CONSTRAINT task_notices_letter_id_fkey FOREIGN KEY (letter_id) REFERENCES public.letters(id);
 
@@ -1253,6 +1276,8 @@ CREATE POLICY own_organisation ON public.stale_days USING ((organisation_id = (N
 
 CREATE POLICY own_organisation ON public.stores USING ((organisation_id = (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid));
 
+CREATE POLICY own_organisation ON public.task_changes USING ((organisation_id = (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid));
+
 CREATE POLICY own_organisation ON public.task_notices USING ((organisation_id = (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid));
 
 CREATE POLICY own_organisation ON public.tasks USING ((organisation_id = (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid));
@@ -1292,6 +1317,8 @@ ALTER TABLE public.schedules ENABLE ROW LEVEL SECURITY;
 ALTER TABLE public.stale_days ENABLE ROW LEVEL SECURITY;
 
 ALTER TABLE public.stores ENABLE ROW LEVEL SECURITY;
+
+ALTER TABLE public.task_changes ENABLE ROW LEVEL SECURITY;
 
 ALTER TABLE public.task_notices ENABLE ROW LEVEL SECURITY;
 
@@ -1380,6 +1407,8 @@ GRANT SELECT,INSERT,DELETE,UPDATE ON TABLE public.sessions TO vatwright_app;
 GRANT SELECT,INSERT,DELETE,UPDATE ON TABLE public.stale_days TO vatwright_app;
 
 GRANT SELECT,INSERT,DELETE,UPDATE ON TABLE public.stores TO vatwright_app;
+
+GRANT SELECT,INSERT,UPDATE ON TABLE public.task_changes TO vatwright_app;
 
 GRANT SELECT,INSERT,DELETE,UPDATE ON TABLE public.task_notices TO vatwright_app;
 

@@ -103,12 +103,26 @@ export const createTasks = sqlMigration(
       page text NOT NULL,
       name text NOT NULL CHECK (name <> ''),
       query text NOT NULL,
+      shared boolean NOT NULL DEFAULT false,
+      version integer NOT NULL DEFAULT 0,
       UNIQUE (person_id, page, name)
     );
+    -- Many tasks changed at once: what was said of each, and how those changed stood before.
+    CREATE TABLE task_changes (
+      id uuid PRIMARY KEY,
+      organisation_id uuid NOT NULL REFERENCES organisations,
+      person_id uuid NOT NULL REFERENCES people,
+      kind text NOT NULL CHECK (kind IN ('assign', 'excuse', 'defer')),
+      made_at timestamptz NOT NULL,
+      results jsonb NOT NULL,
+      before jsonb NOT NULL,
+      undone_at timestamptz
+    );
     ${tenantTable('saved_views')}
+    ${tenantTable('task_changes', 'SELECT, INSERT, UPDATE')}
   `,
   `
-    DROP TABLE saved_views;
+    DROP TABLE task_changes, saved_views;
     DROP FUNCTION task_state, ensure_task_months;
     DROP TABLE tasks;
   `,

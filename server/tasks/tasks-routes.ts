@@ -1,7 +1,9 @@
 import { listTasks, readTask, readTaskBoard, readTaskCalendar } from '@shared/tasks/tasks-contract';
 import type { Routes } from '../http/routes';
+import { savedViewsRoutes } from './saved-views-routes';
 import { taskBoard } from './task-board';
 import { taskCalendar } from './task-calendar';
+import { taskChangesRoutes } from './task-changes-routes';
 import { pageOfTasks, taskById } from './task-queries';
 
 export function tasksRoutes(routes: Routes): void {
@@ -18,4 +20,7 @@ export function tasksRoutes(routes: Routes): void {
   routes.on(readTask, ({ tenant, actor, params, now }) =>
     taskById(tenant, actor, params.id, now()),
   );
+
+  taskChangesRoutes(routes);
+  savedViewsRoutes(routes);
 }
