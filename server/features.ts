@@ -6,9 +6,11 @@ import { proceduresRoutes } from './procedures/procedures-routes';
 import { programmesRoutes } from './programmes/programmes-routes';
 import { rulesRoutes } from './programmes/rules-routes';
 import { complianceRoutes } from './compliance/compliance-routes';
+import { digestRoutes } from './digests/digest-routes';
 import { mailRoutes } from './mail/mail-routes';
 import { tasksRoutes } from './tasks/tasks-routes';
 import type { Routes } from './http/routes';
+import { openapiRoutes } from './openapi/openapi-routes';
 import { uploadRoutes } from './uploads/upload-routes';
 import { todayRoutes } from './today/today-routes';
 import { peopleRoutes } from './people/people-routes';
@@ -30,6 +32,8 @@ export function registerFeatures(routes: Routes): void {
   shiftCheckRoutes(routes);
   findingRoutes(routes);
   complianceRoutes(routes);
+  digestRoutes(routes);
   mailRoutes(routes);
   tasksRoutes(routes);
+  openapiRoutes(routes);
 }

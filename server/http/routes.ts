@@ -38,6 +38,9 @@ const signedOut = () => new Problem(401, 'signed-out', 'Please sign in.');
  * transaction of the actor's organisation, and a write that carries an idempotency key runs once.
  */
 export class Routes {
+  /** What was bound, in order: the API describes itself from this, and tests walk it. */
+  readonly endpoints: AnyEndpoint[] = [];
+
   constructor(
     private readonly router: Router,
     readonly services: Services,
@@ -99,6 +102,7 @@ export class Routes {
   private bind(endpoint: AnyEndpoint, answer: (req: Request, res: Response) => Promise<void>) {
     const method = endpoint.method.toLowerCase() as 'get' | 'post' | 'put' | 'patch' | 'delete';
     this.router[method](endpoint.path, answer);
+    this.endpoints.push(endpoint);
   }
 
   private asActor<T>(

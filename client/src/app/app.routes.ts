@@ -8,6 +8,8 @@ import signInRoutes from './sign-in/sign-in.routes';
  * routes by default. What the navigation shows of them stands in `shell/navigation.ts`.
  */
 const features: Routes = [
+  { path: 'board', loadChildren: () => import('./tasks/board.routes') },
+  { path: 'tasks', loadChildren: () => import('./tasks/tasks.routes') },
   { path: 'fleet', loadChildren: () => import('./fleet/fleet.routes') },
   // Short addresses for letters, labels and links from other features.
   { path: 'stores/:id', redirectTo: 'fleet/stores/:id' },

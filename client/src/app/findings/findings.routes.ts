@@ -1,6 +1,6 @@
 import type { Routes } from '@angular/router';
-import { leaveUnsaved } from '../procedures/editor/leave-unsaved-guard';
 import { can } from '../session/session-guard';
+import { leaveUnsaved } from '../ui/confirm-dialog/leave-unsaved-guard';
 
 const routes: Routes = [
   {

@@ -14,6 +14,18 @@ export interface NavigationItem {
 /** In the order in which they stand in the header; what does not fit goes under "More". */
 export const navigation: readonly NavigationItem[] = [
   {
+    path: 'board',
+    label: $localize`:@@tasks.board.title:Board`,
+    icon: 'board',
+    anyOf: ['board.read'],
+  },
+  {
+    path: 'tasks',
+    label: $localize`:@@tasks.title:Tasks`,
+    icon: 'list',
+    anyOf: ['board.read', 'tasks.do', 'compliance.read'],
+  },
+  {
     path: 'fleet',
     label: $localize`:@@fleet.title:Fleet`,
     icon: 'store',

@@ -11,6 +11,7 @@ import { Figure } from '../../ui/figure/figure';
 import { FilterBar } from '../../ui/filter-bar/filter-bar';
 import { FilterDates } from '../filter-dates/filter-dates';
 import { FilterSelect } from '../../ui/filter-bar/filter-select';
+import { kept } from '../../tasks/kept';
 import { PageHeader } from '../../ui/page-header/page-header';
 import { PageEmpty } from '../../ui/page-states/page-empty';
 import { PageLoading } from '../../ui/page-states/page-loading';
@@ -100,7 +101,7 @@ export class FindingList {
   private readonly allRegions = this.api.regions();
   private readonly namedStore = this.api.store(() => this.store());
 
-  protected readonly shown = computed(() => (this.list.hasValue() ? this.list.value() : null));
+  protected readonly shown = kept(this.list);
   protected readonly openCount = computed(() => this.open.hasValue() && this.open.value().total);
   protected readonly stopCount = computed(
     () => this.stopped.hasValue() && this.stopped.value().total,
