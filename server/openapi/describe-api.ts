@@ -97,6 +97,9 @@ function parametersOf(schema: z.ZodType | undefined, place: 'path' | 'query'): o
 
 function schemaOf(schema: z.ZodType, io: 'input' | 'output' = 'input') {
   // What JSON Schema cannot say (a transformed text, a file) stands as "anything".
-  const { $schema: _dialect, ...described } = z.toJSONSchema(schema, { io, unrepresentable: 'any' });
+  const { $schema: _dialect, ...described } = z.toJSONSchema(schema, {
+    io,
+    unrepresentable: 'any',
+  });
   return described;
 }
