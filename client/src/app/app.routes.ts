@@ -8,6 +8,10 @@ import signInRoutes from './sign-in/sign-in.routes';
  * routes by default. What the navigation shows of them stands in `shell/navigation.ts`.
  */
 const features: Routes = [
+  { path: 'today', loadChildren: () => import('./today/today.routes') },
+  { path: 'shift', loadChildren: () => import('./shift-checks/shift.routes') },
+  // Before the tasks' own pages, which would take it for a task.
+  { path: 'tasks/:id/sheet', loadChildren: () => import('./task-sheet/task-sheet.routes') },
   { path: 'board', loadChildren: () => import('./tasks/board.routes') },
   { path: 'tasks', loadChildren: () => import('./tasks/tasks.routes') },
   { path: 'fleet', loadChildren: () => import('./fleet/fleet.routes') },

@@ -5,6 +5,7 @@ import type { readSession, signIn, signOut } from '@shared/sign-in/sign-in-contr
 import { catchError, firstValueFrom, of, tap, throwError } from 'rxjs';
 import type { Observable } from 'rxjs';
 import { Api } from '../api/api';
+import { forgetDevice } from '../offline/forget-device';
 import { Problem } from '../problems/problem';
 
 /** Who is signed in, as the server answers it. */
@@ -66,7 +67,12 @@ export class Session {
   }
 
   signOut(): Observable<unknown> {
-    return this.api.call<typeof signOut>('DELETE', '/session').pipe(tap(() => this.forget()));
+    return this.api.call<typeof signOut>('DELETE', '/session').pipe(
+      tap(() => {
+        this.forget();
+        forgetDevice();
+      }),
+    );
   }
 
   /** The server no longer knows us. */

@@ -14,6 +14,18 @@ export interface NavigationItem {
 /** In the order in which they stand in the header; what does not fit goes under "More". */
 export const navigation: readonly NavigationItem[] = [
   {
+    path: 'today',
+    label: $localize`:@@today.title:Today`,
+    icon: 'route',
+    anyOf: ['today.read'],
+  },
+  {
+    path: 'shift',
+    label: $localize`:@@shift-checks.title:Shift`,
+    icon: 'check',
+    anyOf: ['shift.read'],
+  },
+  {
     path: 'board',
     label: $localize`:@@tasks.board.title:Board`,
     icon: 'board',
