@@ -47,11 +47,16 @@ export function placesWords(
   return [what, ...filters].join(' · ');
 }
 
-export function reachWords({ stores, units }: Reach): string {
+/** "45 stores, 140 units"; a rule for stores reaches no unit, which goes without saying. */
+export function reachWords(
+  { stores, units }: Reach,
+  appliesTo: RuleDefinition['appliesTo'] = 'unit',
+): string {
   const ofStores =
     stores === 1
       ? $localize`:@@programmes.reach.one-store:1 store`
       : $localize`:@@programmes.reach.stores:${stores}:stores: stores`;
+  if (appliesTo === 'store') return ofStores;
   const ofUnits =
     units === 1
       ? $localize`:@@programmes.reach.one-unit:1 unit`

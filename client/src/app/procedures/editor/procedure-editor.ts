@@ -33,6 +33,7 @@ import type { Procedure, ProcedureVersion } from '../procedures-api';
 import { ProceduresApi } from '../procedures-api';
 import { VersionChanges } from '../version-changes/version-changes';
 import { contentOf, draftForm, emptyContent } from './draft-form';
+import { draftFaults } from './draft-faults';
 import { draftLabels } from './draft-labels';
 import type { HoldsWork } from '../../ui/confirm-dialog/leave-unsaved-guard';
 import { StepList } from './step-list';
@@ -216,7 +217,7 @@ export class ProcedureEditor implements HoldsWork {
   private refused(failure: unknown, mine: ProcedureContent): void {
     const form = this.form();
     this.labels.set(draftLabels(form));
-    this.general.set(showInForm(form, failure));
+    this.general.set(showInForm(form, draftFaults(failure)));
     this.stepList()?.openFaulty();
     // The opened steps must be drawn before the summary's links can lead into them.
     setTimeout(() => this.tries.update((count) => count + 1));

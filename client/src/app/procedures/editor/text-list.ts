@@ -24,7 +24,7 @@ import { TextPair } from './text-pair';
           matIconButton
           type="button"
           [attr.aria-label]="removeLabel(index)"
-          (click)="list().removeAt(index)"
+          (click)="remove(index)"
         >
           <vw-icon name="trash" />
         </button>
@@ -59,6 +59,11 @@ export class TextList {
 
   protected add(): void {
     this.list().push(textPair());
+    this.list().markAsDirty();
+  }
+
+  protected remove(index: number): void {
+    this.list().removeAt(index);
     this.list().markAsDirty();
   }
 

@@ -39,6 +39,9 @@ const text = (value: string | undefined): string => value ?? '';
   ],
   templateUrl: './procedure-list.html',
   styles: `
+    vw-data-table {
+      margin-top: var(--vw-space-3);
+    }
     .mark {
       margin-left: var(--vw-space-2);
       padding: 1px 8px;

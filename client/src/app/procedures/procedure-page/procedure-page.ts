@@ -1,4 +1,3 @@
-import { DatePipe } from '@angular/common';
 import {
   ChangeDetectionStrategy,
   Component,
@@ -21,6 +20,7 @@ import { toProblem } from '../../problems/problem';
 import { problemWords } from '../../problems/problem-words';
 import type { Language } from '../../session/language-choice';
 import { LanguageChoice } from '../../session/language-choice';
+import { Session } from '../../session/session';
 import { PageTitle } from '../../shell/page-title';
 import { Confirm } from '../../ui/confirm-dialog/confirm';
 import { Notices } from '../../ui/notice/notices';
@@ -29,6 +29,7 @@ import { PageEmpty } from '../../ui/page-states/page-empty';
 import { PageError } from '../../ui/page-states/page-error';
 import { PageForbidden } from '../../ui/page-states/page-forbidden';
 import { PageLoading } from '../../ui/page-states/page-loading';
+import { TimeInZonePipe } from '../../ui/text/time-in-zone-pipe';
 import { ProcedureView } from '../procedure-view/procedure-view';
 import type { Procedure, ProcedureVersion } from '../procedures-api';
 import { ProceduresApi } from '../procedures-api';
@@ -38,7 +39,6 @@ import { VersionChanges } from '../version-changes/version-changes';
 @Component({
   selector: 'vw-procedure-page',
   imports: [
-    DatePipe,
     MatButton,
     MatButtonToggle,
     MatButtonToggleGroup,
@@ -53,6 +53,7 @@ import { VersionChanges } from '../version-changes/version-changes';
     PageLoading,
     ProcedureView,
     RouterLink,
+    TimeInZonePipe,
     VersionChanges,
   ],
   templateUrl: './procedure-page.html',
@@ -77,6 +78,7 @@ export class ProcedurePage {
   });
   protected readonly fault = computed(() => problemWords(this.problem()));
   protected readonly language = signal<Language>(inject(LanguageChoice).current);
+  protected readonly zone = inject(Session).timeZone;
   protected readonly busy = signal(false);
 
   /** Number of the version on show: the one in force, or the draft before there is one. */

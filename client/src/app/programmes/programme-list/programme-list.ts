@@ -36,6 +36,9 @@ const text = (value: string | undefined): string => value ?? '';
   ],
   templateUrl: './programme-list.html',
   styles: `
+    vw-data-table {
+      margin-top: var(--vw-space-3);
+    }
     .described {
       display: block;
       font-weight: 400;

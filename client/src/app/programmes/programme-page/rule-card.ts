@@ -37,32 +37,40 @@ import { WindowPicture } from '../window-picture/window-picture';
       </p>
       <p class="vw-small vw-secondary">{{ who() }} · {{ where() }} · {{ reach() }}</p>
     </div>
-    <div class="ahead">
-      @if (next().length > 0) {
+    @if (next().length > 0) {
+      <div>
         <p class="vw-small vw-secondary" i18n="@@programmes.next">Next</p>
         <ul>
           @for (date of next(); track date) {
             <li>{{ date }}</li>
           }
         </ul>
-      }
-      <vw-window-picture [plan]="rule().window" [dueTime]="dueTime()" [words]="false" />
-    </div>
+      </div>
+    }
+    <vw-window-picture [plan]="rule().window" [dueTime]="dueTime()" [words]="false" />
   `,
   styles: `
     :host {
       display: grid;
-      grid-template-columns: minmax(0, 1fr) minmax(13rem, 18rem);
+      grid-template-columns: minmax(0, 1fr) 13rem 15rem;
+      align-items: start;
       gap: var(--vw-space-3) var(--vw-space-5);
       padding: var(--vw-space-4);
     }
-    @media (width < 720px) {
+    vw-window-picture {
+      grid-column: 3;
+      padding-top: var(--vw-space-3);
+    }
+    @media (width < 900px) {
       :host {
         grid-template-columns: minmax(0, 1fr);
       }
+      vw-window-picture {
+        grid-column: 1;
+        padding-top: 0;
+      }
     }
-    .words,
-    .ahead {
+    .words {
       display: grid;
       gap: var(--vw-space-1);
       align-content: start;
@@ -77,7 +85,7 @@ import { WindowPicture } from '../window-picture/window-picture';
       font-weight: 400;
     }
     ul {
-      margin: 0 0 var(--vw-space-2);
+      margin: 0;
       padding: 0;
       list-style: none;
     }
@@ -93,7 +101,7 @@ export class RuleCard {
 
   protected readonly who = computed(() => audienceWord(this.rule().audience));
   protected readonly where = computed(() => placesWords(this.rule()));
-  protected readonly reach = computed(() => reachWords(this.rule().reach));
+  protected readonly reach = computed(() => reachWords(this.rule().reach, this.rule().appliesTo));
   protected readonly dueTime = computed(() => this.rule().recurrence.startsLocal.slice(11, 16));
   protected readonly next = computed(() => {
     if (this.rule().retiredAt) return [];

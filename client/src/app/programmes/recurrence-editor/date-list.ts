@@ -26,35 +26,31 @@ import { wallText } from '../programme-words';
           @for (date of dates(); track date) {
             <li>
               {{ text(date) }}
-              @if (!disabled()) {
-                <button matIconButton type="button" (click)="remove(date)">
-                  <vw-icon name="close" />
-                  <span class="vw-hidden" i18n="@@programmes.remove-date"
-                    >Remove {{ text(date) }}</span
-                  >
-                </button>
-              }
+              <button matIconButton type="button" (click)="remove(date)">
+                <vw-icon name="close" />
+                <span class="vw-hidden" i18n="@@programmes.remove-date"
+                  >Remove {{ text(date) }}</span
+                >
+              </button>
             </li>
           }
         </ul>
       }
-      @if (!disabled()) {
-        <div class="vw-row">
-          <mat-form-field appearance="outline" subscriptSizing="dynamic">
-            <mat-label i18n="@@programmes.date-time">Day and time</mat-label>
-            <input
-              matInput
-              type="datetime-local"
-              [value]="typed()"
-              (input)="typed.set($any($event.target).value)"
-              (keydown.enter)="$event.preventDefault(); add()"
-            />
-          </mat-form-field>
-          <button matButton type="button" [disabled]="!typed()" (click)="add()">
-            <ng-container i18n="@@programmes.add-date">Add</ng-container>
-          </button>
-        </div>
-      }
+      <div class="vw-row">
+        <mat-form-field appearance="outline" subscriptSizing="dynamic">
+          <mat-label i18n="@@programmes.date-time">Day and time</mat-label>
+          <input
+            matInput
+            type="datetime-local"
+            [value]="typed()"
+            (input)="typed.set($any($event.target).value)"
+            (keydown.enter)="$event.preventDefault(); add()"
+          />
+        </mat-form-field>
+        <button matButton type="button" [disabled]="!typed()" (click)="add()">
+          <ng-container i18n="@@programmes.add-date">Add</ng-container>
+        </button>
+      </div>
     </fieldset>
   `,
   styles: `
@@ -66,7 +62,7 @@ import { wallText } from '../programme-words';
       border: 0;
     }
     legend {
-      padding: 0 0 var(--vw-space-1);
+      padding: 0 0 var(--vw-space-3);
       color: var(--vw-ink-2);
       font-size: var(--vw-text-small);
     }
@@ -90,7 +86,6 @@ export class DateList {
 
   readonly legend = input.required<string>();
   readonly dates = input.required<readonly string[]>();
-  readonly disabled = input(false);
 
   readonly datesChange = output<string[]>();
 

@@ -3,7 +3,6 @@ import {
   Component,
   computed,
   inject,
-  input,
   linkedSignal,
   LOCALE_ID,
   model,
@@ -17,23 +16,14 @@ import { MatInput } from '@angular/material/input';
 import { MatSelect } from '@angular/material/select';
 import type { Weekday } from '@shared/calendar/calendar-date';
 import { addMonths, isCalendarDate } from '@shared/calendar/calendar-date';
-import { localAt } from '@shared/calendar/instant-of';
 import { readLocalDateTime } from '@shared/calendar/local-date-time';
 import { recurrenceProblems } from '@shared/programmes/recurrence-problems';
 import type { Recurrence } from '@shared/programmes/recurrence-set';
-import { asRecurrenceSet } from '@shared/programmes/recurrence-set';
-import { recurrenceWords } from '@shared/programmes/recurrence-words';
-import { nextZonedOccurrences } from '@shared/recurrence/zoned-occurrences';
-import { LanguageChoice } from '../../session/language-choice';
-import { Session } from '../../session/session';
-import { zoneName } from '../../ui/text/zoned-text';
-import { wallText } from '../programme-words';
 import { DateList } from './date-list';
+import { NextDates } from './next-dates';
 import { nthWord, unitWord } from './pattern-words';
 import type { PlainPattern, PlainUnit } from './plain-pattern';
 import { patternFrom, toPattern, toRuleText } from './plain-pattern';
-import { previewZones } from './preview-zones';
-import { recurrenceProblemWords } from './problem-words';
 
 /**
  * Writes a recurrence in plain words or as RFC 5545 text; the sentence and the next dates, or what
@@ -52,6 +42,7 @@ import { recurrenceProblemWords } from './problem-words';
     MatLabel,
     MatOption,
     MatSelect,
+    NextDates,
   ],
   templateUrl: './recurrence-editor.html',
   styleUrl: './recurrence-editor.scss',
@@ -59,10 +50,8 @@ import { recurrenceProblemWords } from './problem-words';
 })
 export class RecurrenceEditor {
   private readonly locale = inject(LOCALE_ID);
-  private readonly language = inject(LanguageChoice).current;
 
   readonly recurrence = model.required<Recurrence>();
-  readonly disabled = input(false);
 
   private readonly wantsText = signal(false);
   /** What the plain controls show; null where only the text can say it. */
@@ -82,24 +71,7 @@ export class RecurrenceEditor {
         : rrules.join('\n'),
   });
 
-  private readonly problemsFound = computed(() => recurrenceProblems(this.recurrence()));
-  protected readonly problems = computed(() =>
-    this.problemsFound().map((problem) => recurrenceProblemWords(problem)),
-  );
-  protected readonly sentence = computed(() =>
-    this.problemsFound().length > 0 ? '' : recurrenceWords(this.recurrence())[this.language],
-  );
-  protected readonly zones = previewZones(inject(Session).timeZone(), this.locale);
-  /** The zone of the store whose next dates are shown. */
-  protected readonly zone = signal(this.zones[0]?.id ?? 'UTC');
-  protected readonly next = computed(() => {
-    if (this.problemsFound().length > 0) return [];
-    const set = asRecurrenceSet(this.recurrence());
-    return nextZonedOccurrences(set, this.zone(), Date.now(), 12).map(({ local, instant }) => ({
-      local,
-      words: `${wallText(localAt(instant, this.zone()), this.locale)} ${zoneName(new Date(instant), this.zone(), this.locale)}`,
-    }));
-  });
+  protected readonly faulty = computed(() => recurrenceProblems(this.recurrence()).length > 0);
 
   protected readonly units: readonly PlainUnit[] = ['DAILY', 'WEEKLY', 'MONTHLY', 'YEARLY'];
   protected readonly weekdays = ([0, 1, 2, 3, 4, 5, 6] as const).map((weekday) => ({

@@ -2,7 +2,7 @@ import { recurrenceWords } from '@shared/programmes/recurrence-words';
 import type { RuleDefinition } from '@shared/programmes/rule-definition';
 import type { Language } from '../../session/language-choice';
 import { audienceWord, placesWords, wallText } from '../programme-words';
-import { windowLines } from '../window-picture/window-lines';
+import { windowWords } from '../window-picture/window-lines';
 
 /** One thing that a rule says, in words. */
 export interface DefinitionLine {
@@ -40,7 +40,7 @@ export function definitionLines(
     [
       'window',
       $localize`:@@programmes.window:Window`,
-      windowLines(window, recurrence.startsLocal.slice(11, 16)).join('; '),
+      windowWords(window, recurrence.startsLocal.slice(11, 16)),
     ],
     [
       'horizon',

@@ -33,6 +33,7 @@ import { RuleConflict } from './rule-conflict';
 import { RuleFields } from './rule-fields';
 import { definitionOf, newDefinition, ruleForm } from './rule-form';
 import { ruleLabels, showRuleFaults } from './rule-labels';
+import { RuleView } from './rule-view';
 
 /** One rule: what it says, in a form for those who may change it, and what it said before. */
 @Component({
@@ -48,6 +49,7 @@ import { ruleLabels, showRuleFaults } from './rule-labels';
     RuleConflict,
     RuleFields,
     RuleHistory,
+    RuleView,
   ],
   templateUrl: './rule-editor.html',
   styleUrl: './rule-editor.scss',
@@ -192,9 +194,7 @@ export class RuleEditor implements HoldsWork {
 
   private fill(rule: Rule): void {
     this.filledFrom.set(rule);
-    const form = ruleForm(rule);
-    if (!rule.mayEdit) form.disable({ emitEvent: false });
-    this.form.set(form);
+    this.form.set(ruleForm(rule));
   }
 
   private run(call: Observable<Rule>, then: (rule: Rule) => void): void {

@@ -39,7 +39,6 @@ export class RuleFields {
   readonly procedures = input.required<readonly ProcedureChoice[]>();
   /** Titles of procedures by id. */
   readonly titles = input.required<ReadonlyMap<string, string>>();
-  readonly disabled = input(false);
 
   private readonly value = toSignal(
     toObservable(this.form).pipe(

@@ -49,8 +49,9 @@ export function ruleForm(rule: RuleDefinition) {
     }),
     audience: control(rule.audience),
     appliesTo: control(rule.appliesTo),
-    unitKind: control(rule.unitKind),
-    pumpFace: control(rule.pumpFace),
+    /** Empty for any; a select shows no word for null. */
+    unitKind: control<NonNullable<RuleDefinition['unitKind']> | ''>(rule.unitKind ?? ''),
+    pumpFace: control<NonNullable<RuleDefinition['pumpFace']> | ''>(rule.pumpFace ?? ''),
     recurrence: new FormControl<Recurrence>(rule.recurrence, {
       nonNullable: true,
       validators: [canBeUsed],
@@ -79,10 +80,12 @@ export type RuleForm = ReturnType<typeof ruleForm>;
 
 /** The definition that a form holds; to be asked of a valid form. */
 export function definitionOf(form: RuleForm): RuleDefinition {
-  const { window, name, horizonDays, rank, ...rest } = form.getRawValue();
+  const { window, name, unitKind, pumpFace, horizonDays, rank, ...rest } = form.getRawValue();
   return {
     ...rest,
     name: name.trim(),
+    unitKind: unitKind || null,
+    pumpFace: pumpFace || null,
     window: windowOf(window),
     horizonDays: horizonDays ?? 1,
     rank: rank ?? 0,

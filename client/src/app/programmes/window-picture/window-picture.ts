@@ -1,7 +1,7 @@
 import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
 import type { WindowPlan } from '@shared/recurrence/window';
 import { VAT } from '../../ui/vat-glyph/vat-shape';
-import { windowLines } from './window-lines';
+import { windowLines, windowWords } from './window-lines';
 import { windowMarks } from './window-marks';
 
 /** A task's window on a small line: when it opens, is due soon, is due, closes, lapses. */
@@ -24,12 +24,22 @@ import { windowMarks } from './window-marks';
     </svg>
     @if (words()) {
       <ul>
-        @for (word of lines(); track word) {
-          <li>{{ word }}</li>
+        @for (line of lines(); track line.moment) {
+          <li>
+            @if (line.moment === 'due') {
+              <svg class="key glyph" viewBox="0 0 20 20" aria-hidden="true">
+                <path [attr.d]="vat.walls" />
+                <path [attr.d]="vat.rims" />
+              </svg>
+            } @else if (line.moment !== 'closes') {
+              <span class="key" [class]="line.moment"></span>
+            }
+            {{ line.words }}
+          </li>
         }
       </ul>
     } @else {
-      <span class="vw-hidden">{{ lines().join('; ') }}</span>
+      <span class="vw-hidden">{{ told() }}</span>
     }
   `,
   styles: `
@@ -50,18 +60,18 @@ import { windowMarks } from './window-marks';
       stroke: var(--vw-line);
       stroke-width: 1.5;
     }
-    .open,
-    .soon,
-    .late {
+    path.open,
+    path.soon,
+    path.late {
       stroke-width: 7;
     }
-    .open {
+    path.open {
       stroke: var(--vw-steel);
     }
-    .soon {
+    path.soon {
       stroke: var(--vw-amber);
     }
-    .late {
+    path.late {
       stroke: var(--vw-vermilion);
       stroke-width: 2.5;
     }
@@ -77,10 +87,35 @@ import { windowMarks } from './window-marks';
       stroke: var(--vw-ink);
       stroke-width: 1.6;
     }
+    li {
+      display: inline-flex;
+      gap: var(--vw-space-2);
+      align-items: center;
+    }
+    .key {
+      flex: none;
+      width: 16px;
+      height: 6px;
+      border-radius: 1px;
+      background: var(--vw-steel);
+    }
+    .key.soon {
+      background: var(--vw-amber);
+    }
+    .key.late {
+      height: 3px;
+      background: var(--vw-vermilion);
+    }
+    .glyph {
+      height: 16px;
+      background: none;
+      stroke: var(--vw-ink);
+      stroke-width: 1.6;
+    }
     ul {
       display: flex;
       flex-wrap: wrap;
-      gap: 0 var(--vw-space-4);
+      gap: var(--vw-space-1) var(--vw-space-4);
       margin: 0;
       padding: 0;
       color: var(--vw-ink-2);
@@ -103,6 +138,8 @@ export class WindowPicture {
     return windowMarks(this.plan(), (hours * 60 + minutes) / 1440);
   });
   protected readonly lines = computed(() => windowLines(this.plan(), this.dueTime()));
+
+  protected readonly told = computed(() => windowWords(this.plan(), this.dueTime()));
 
   protected span(from: number, to: number): string {
     return `M${from} 10H${Math.max(from, to)}`;
