@@ -103,7 +103,7 @@ describe('queueing reminders', () => {
     expect(await lettersOf(manager.id)).toEqual([]);
     await run(morning(10, '13:30'));
     const [letter] = await lettersOf(manager.id);
-    expect(letter?.subject).toBe('Vatwright: 2 por vencer');
+    expect(letter?.subject).toBe('Vatwright: 2 vencen pronto');
     expect(letter?.plain).toContain('Motor current (es)');
     expect(letter?.plain).toMatch(/hasta el vie, 12 (de )?jun.*9:59.*MST/);
     expect(await noticesOf(manager.id)).toHaveLength(2);

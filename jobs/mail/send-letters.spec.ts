@@ -32,7 +32,7 @@ describe('sending letters', () => {
       dedupe_key: `letter ${(letters += 1)}`,
       to_address: person.email,
       locale: 'es',
-      subject: 'Vatwright: 2 por vencer',
+      subject: 'Vatwright: 2 vencen pronto',
       html: '<p>Hola</p>',
       plain: 'Hola',
       ...row,
@@ -69,7 +69,7 @@ describe('sending letters', () => {
     const [mail] = sink.mails;
     expect(mail).toMatchObject({
       messageId: `<${id}@vatwright.example>`,
-      subject: 'Vatwright: 2 por vencer',
+      subject: 'Vatwright: 2 vencen pronto',
       date: new Date('2026-06-10T12:00:00Z'),
     });
     expect(mail?.text?.trim()).toBe('Hola');

@@ -53,25 +53,25 @@ const words = {
   es: {
     greeting: (name: string) => `Buenos días, ${name}:`,
     subject: {
-      overdue: (n: number) => (n === 1 ? '1 atrasada' : `${n} atrasadas`),
-      'due-soon': (n: number) => `${n} por vencer`,
-      missed: (n: number) => (n === 1 ? '1 sin hacer' : `${n} sin hacer`),
+      overdue: (n: number) => (n === 1 ? '1 vencida' : `${n} vencidas`),
+      'due-soon': (n: number) => (n === 1 ? '1 vence pronto' : `${n} vencen pronto`),
+      missed: (n: number) => (n === 1 ? '1 no hecha' : `${n} no hechas`),
     },
     preview: (count: number, stores: number) =>
       `${count === 1 ? '1 tarea' : `${count} tareas`} en ${stores === 1 ? '1 tienda' : `${stores} tiendas`}`,
     heading: {
-      overdue: 'Atrasadas: todavía se pueden hacer, fuera de plazo',
-      'due-soon': 'Por vencer',
-      missed: 'Sin hacer: ya no se pueden hacer',
+      overdue: 'Vencidas: todavía se pueden hacer, con retraso',
+      'due-soon': 'Vencen pronto',
+      missed: 'No hechas: ya no se pueden hacer',
     },
     when: {
-      overdue: (moment: string) => `el plazo terminó el ${moment}`,
+      overdue: (moment: string) => `la ventana cerró el ${moment}`,
       'due-soon': (moment: string) => `hasta el ${moment}`,
-      missed: (moment: string) => `el plazo terminó el ${moment}`,
+      missed: (moment: string) => `la ventana cerró el ${moment}`,
     },
     more: (n: number) => `y ${n} más`,
     button: 'Abrir la lista',
-    note: 'De cada tarea se avisa una vez cuando está por vencer y otra cuando terminó su plazo. Siga las precauciones de cada procedimiento; deciden los códigos locales y los profesionales con licencia.',
+    note: 'De cada tarea se avisa una vez cuando vence pronto y otra cuando cerró su ventana. Siga las precauciones de cada procedimiento; deciden las normas locales y la práctica con licencia.',
   },
 } as const;
 

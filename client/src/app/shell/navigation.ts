@@ -61,6 +61,24 @@ export const navigation: readonly NavigationItem[] = [
     icon: 'finding',
     anyOf: ['findings.read'],
   },
+  {
+    path: 'compliance',
+    label: $localize`:@@compliance.title:Compliance`,
+    icon: 'chart',
+    anyOf: ['compliance.read'],
+  },
+  {
+    path: 'digests',
+    label: $localize`:@@digests.title:Digests`,
+    icon: 'history',
+    anyOf: ['digests.read'],
+  },
+  {
+    path: 'letters',
+    label: $localize`:@@letters.title:Letters`,
+    icon: 'mail',
+    anyOf: ['mail.read'],
+  },
 ];
 
 /** Where each role starts, the broadest role of a person deciding. */
