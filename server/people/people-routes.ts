@@ -1,7 +1,10 @@
 import * as contract from '@shared/people/people-contract';
+import { exportTable } from '../exports/export-table';
+import { pageBatches } from '../exports/read-batches';
 import type { Routes } from '../http/routes';
 import { editPerson } from './edit-person';
 import { editRoles } from './edit-roles';
+import { fileRowsOf, personColumns } from './export-columns';
 import { inviteAgain, invitePerson } from './invite-person';
 import { pageOfPeople, personById } from './person-queries';
 import { activatePerson, deactivatePerson } from './set-person-active';
@@ -10,6 +13,19 @@ export function peopleRoutes(routes: Routes): void {
   const { BASE_URL } = routes.services.config;
 
   routes.on(contract.listPeople, ({ tenant, actor, query }) => pageOfPeople(tenant, actor, query));
+
+  routes.download(contract.exportPeople, ({ tenant, actor, query: { format, ...filters }, now }) =>
+    exportTable(actor, {
+      name: { en: 'people', es: 'personas' },
+      format,
+      columns: personColumns,
+      batches: pageBatches(async (page, pageSize) => {
+        const { rows, total } = await pageOfPeople(tenant, actor, { ...filters, page, pageSize });
+        return { rows: rows.flatMap(fileRowsOf), total };
+      }),
+      now: now(),
+    }),
+  );
 
   routes.on(contract.readPerson, ({ tenant, actor, params }) =>
     personById(tenant, actor, params.id),

@@ -120,21 +120,6 @@ export async function pageOfPeople(
   return { rows: rows.map(presentRow), total: count?.total ?? 0, page, pageSize };
 }
 
-/** Everybody of a list, for a file. */
-export async function peopleForFile(
-  tenant: Tenant,
-  actor: Actor,
-  filters: Filters,
-): Promise<PersonRow[]> {
-  const binds = new Binds();
-  const where = conditions(actor, filters, binds);
-  const rows = await tenant.rows<Row>(
-    `SELECT ${columns} FROM people p WHERE ${where} ORDER BY ${sorts[filters.sort]}`,
-    binds.values,
-  );
-  return rows.map(presentRow);
-}
-
 /** One person. @throws Problem 404 when there is none, or out of the actor's sight */
 export async function personById(tenant: Tenant, actor: Actor, id: string): Promise<Person> {
   const binds = new Binds();

@@ -285,6 +285,32 @@ describe('people', () => {
       expect([page.total, names(page)]).toEqual([3, ['Walt']]);
     });
 
+    it('is taken away as a file, a line for each role, safe against formulas', async () => {
+      const mine = await makeFleet(app.db);
+      const own = mine.organisationId;
+      const { id, email } = await makePerson(app.db, own, 'administrator', undefined, {
+        name: '=1+1',
+      });
+      await insert(app.db, 'role_grants', {
+        organisation_id: own,
+        person_id: id,
+        role: 'technician',
+        scope_kind: 'region',
+        scope_id: mine.regionId,
+      });
+      const browser = await app.browser().signIn(email);
+      const { text, headers } = await browser.get('/people/export?format=csv').expect(200);
+      expect(headers['content-disposition']).toContain('people-2026-06-10.csv');
+      const lines = text.trim().split(/\r?\n/);
+      expect(lines).toHaveLength(3);
+      expect(lines[0]).toContain('Name');
+      expect(lines.slice(1).map((line) => line.split(',')[2])).toEqual([
+        'administrator',
+        'technician',
+      ]);
+      expect(text).not.toMatch(/(^|,)"?=1/m);
+    });
+
     it('shows a regional facility manager those who serve the region', async () => {
       const own = await makePerson(
         app.db,
