@@ -1,9 +1,13 @@
 import {
+  exportCompliance,
   readCompliance,
   readComplianceFilters,
   readCompliancePicture,
 } from '@shared/compliance/compliance-contract';
+import { exportTable } from '../exports/export-table';
+import { pageBatches } from '../exports/read-batches';
 import type { Routes } from '../http/routes';
+import { complianceColumns } from './compliance-columns';
 import { complianceFilters } from './compliance-filters';
 import { compliancePicture } from './compliance-picture';
 import { complianceTable } from './compliance-table';
@@ -13,6 +17,18 @@ export function complianceRoutes(routes: Routes): void {
 
   routes.on(readCompliancePicture, ({ tenant, actor, query }) =>
     compliancePicture(tenant, actor, query),
+  );
+
+  routes.download(exportCompliance, ({ tenant, actor, query: { format, ...query }, now }) =>
+    exportTable(actor, {
+      name: { en: 'compliance', es: 'cumplimiento' },
+      format,
+      columns: complianceColumns(query.by),
+      batches: pageBatches((page, pageSize) =>
+        complianceTable(tenant, actor, { ...query, page, pageSize }),
+      ),
+      now: now(),
+    }),
   );
 
   routes.on(readComplianceFilters, ({ tenant, actor, query }) =>

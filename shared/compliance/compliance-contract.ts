@@ -1,5 +1,6 @@
 import * as z from 'zod';
 import { endpoint } from '../contract/endpoint';
+import { fileFormat, fileReply } from '../exports/export-format';
 import { audiences, windowPlan } from '../programmes/rule-definition';
 import { type Month, monthPattern, monthsIn } from './month';
 import { windowCounts } from './window-counts';
@@ -122,6 +123,15 @@ export const readCompliancePicture = endpoint({
     page: z.int(),
     pageSize: z.int(),
   }),
+});
+
+export const exportCompliance = endpoint({
+  method: 'GET',
+  path: '/compliance/export',
+  summary: 'The compliance table as CSV or XLSX',
+  access: 'compliance.read',
+  query: z.strictObject({ ...table, ...fileFormat }).superRefine(inOrder),
+  reply: fileReply,
 });
 
 const named = z.strictObject({ id: z.uuid(), name: z.string() });

@@ -231,6 +231,19 @@ describe('compliance', () => {
     expect(body.store.id).toBe(north.storeId);
   });
 
+  it('gives the table away as a file, in the order and the language of its reader', async () => {
+    const file = await regional
+      .get('/compliance/export?from=2026-06&to=2026-06&sort=rate&format=csv')
+      .expect(200);
+    const [head, first, second, ...rest] = file.text.replace(/^\ufeff/, '').split('\r\n');
+    expect(head).toMatch(/^Number,Store,"On-time rate","Change in points","On time"/);
+    expect(first).toContain(',0.6,10,3,1,1,5,1,1,0.5,');
+    expect(second).toContain(',1,,1,0,0,1,0,0,,');
+    expect(rest).toEqual(['']);
+    expect(file.headers['content-disposition']).toMatch(/compliance-.*\.csv"$/);
+    await regional.get('/compliance/export?from=2026-06&to=2026-06&format=doc').expect(422);
+  });
+
   it('shows a store’s manager the own store only, whatever is asked', async () => {
     const scope = { kind: 'store', id: south.storeId } as const;
     const person = await makePerson(app.db, organisationId, 'store-manager', scope);
@@ -254,6 +267,7 @@ describe('compliance', () => {
       await browser.get(`/compliance${path}?from=2026-06&to=2026-06`).expect(403);
     }
     await browser.get('/compliance/filters').expect(403);
+    await browser.get('/compliance/export?from=2026-06&to=2026-06&format=csv').expect(403);
     const foreign = await makePerson(app.db, await makeOrganisation(app.db), 'account-owner');
     const stranger = await app.browser().signIn(foreign.email);
     const { body } = await table(stranger, 'from=2026-06&to=2026-06');
