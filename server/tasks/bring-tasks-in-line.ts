@@ -9,7 +9,7 @@ import { wantedTables } from './wanted-tables-sql';
  * Nobody has done anything with it and nobody relies on it: not open yet, not decided or deferred,
  * not on a route that a technician was given. The bound on `occurs_local` only spares old partitions.
  */
-const untouched = (now: string) => `
+export const untouched = (now: string) => `
   t.outcome = 'none' AND t.opens_at > ${now} AND t.deferred_from IS NULL
   AND t.occurs_local > (${now} AT TIME ZONE 'UTC') - interval '2 days'
   AND NOT EXISTS (SELECT FROM visits v JOIN routes ro ON ro.id = v.route_id

@@ -59,6 +59,15 @@ export async function dueScheduleIds(tenant: Tenant, now: Date): Promise<string[
   return rows.map(({ id }) => id);
 }
 
+const columns = `
+  sc.id, sc.rule_id AS "ruleId", r.revision, r.recurrence, r.time_window AS "window",
+  r.procedure_id AS "procedureId", r.audience, sc.store_id AS "storeId",
+  sc.unit_id AS "unitId", s.time_zone AS "timeZone", sc.ended_at IS NOT NULL AS ended,
+  (sc.generated_to IS NULL OR sc.generated_revision IS DISTINCT FROM r.revision
+    OR sc.ended_at IS NOT NULL) AS changed,
+  ${start} AS "fromLocal",
+  least(ahead.horizon, sc.until_on + interval '1 day') AS "toLocal", ahead.horizon`;
+
 /** Locks those of the given schedules that are still due and that no other worker holds. */
 export function lockDueSchedules(
   tenant: Tenant,
@@ -66,18 +75,17 @@ export function lockDueSchedules(
   now: Date,
 ): Promise<DueSchedule[]> {
   return tenant.rows<DueSchedule>(
-    `SELECT sc.id, sc.rule_id AS "ruleId", r.revision, r.recurrence, r.time_window AS "window",
-       r.procedure_id AS "procedureId", r.audience, sc.store_id AS "storeId",
-       sc.unit_id AS "unitId", s.time_zone AS "timeZone", sc.ended_at IS NOT NULL AS ended,
-       (sc.generated_to IS NULL OR sc.generated_revision IS DISTINCT FROM r.revision
-         OR sc.ended_at IS NOT NULL) AS changed,
-       ${start} AS "fromLocal",
-       least(ahead.horizon, sc.until_on + interval '1 day') AS "toLocal", ahead.horizon
-     ${from}
-     WHERE sc.id = ANY($2::uuid[]) AND ${due}
-     FOR UPDATE OF sc SKIP LOCKED`,
+    `SELECT ${columns} ${from} WHERE sc.id = ANY($2::uuid[]) AND ${due} FOR UPDATE OF sc SKIP LOCKED`,
     [now, ids],
   );
+}
+
+/** All due schedules of one rule, whoever holds them: for looking at, not for writing. */
+export function dueSchedulesOf(tenant: Tenant, ruleId: string, now: Date): Promise<DueSchedule[]> {
+  return tenant.rows<DueSchedule>(`SELECT ${columns} ${from} WHERE sc.rule_id = $2 AND ${due}`, [
+    now,
+    ruleId,
+  ]);
 }
 
 /** The first and last month in which due schedules may have tasks; undefined when none is due. */

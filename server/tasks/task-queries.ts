@@ -5,6 +5,7 @@ import type { listTasks } from '@shared/tasks/tasks-contract';
 import { Binds } from '@db/binds';
 import type { Tenant } from '@db/tenant-transaction';
 import type { Actor } from '../access/actor';
+import { cursorBatches } from '../exports/read-batches';
 import { naturalOrder } from '../fleet/search-text';
 import { type Task, type TaskRecord, presentTask, taskColumns, taskJoins } from './present-task';
 import { type TaskFilters, taskConditions } from './task-conditions';
@@ -80,6 +81,24 @@ export async function sortedTasks(
   return presentAll(tenant, actor, rows, now);
 }
 
+/** All tasks of a list in its order, a batch at a time, for a file. */
+export async function* taskBatches(
+  tenant: Tenant,
+  actor: Actor,
+  { sort, ...filters }: Partial<TaskFilters> & Pick<ListQuery, 'sort'>,
+  now: Date,
+): AsyncGenerator<Task[]> {
+  const binds = new Binds();
+  const where = taskConditions(actor, 'tasks.read', filters, now, binds);
+  const titles = await procedureTitles(tenant);
+  yield* cursorBatches<TaskRecord, Task>(
+    tenant,
+    `SELECT ${taskColumns} FROM tasks t ${taskJoins} WHERE ${where} ORDER BY ${sorts[sort].by}`,
+    binds.values,
+    (row) => presentTask(row, titleOf(titles, row), actor, now),
+  );
+}
+
 /** One task. @throws Problem 404 when it does not exist or lies out of the actor's sight */
 export async function taskById(tenant: Tenant, actor: Actor, id: string, now: Date): Promise<Task> {
   const binds = new Binds();
@@ -100,20 +119,20 @@ async function presentAll(
   now: Date,
 ): Promise<Task[]> {
   const titles = await procedureTitles(tenant, [...new Set(rows.map((row) => row.procedureId))]);
-  return rows.map((row) =>
-    presentTask(row, titles.get(row.procedureId) ?? { en: '', es: '' }, actor, now),
-  );
+  return rows.map((row) => presentTask(row, titleOf(titles, row), actor, now));
 }
 
-/** What procedures are called in their newest published version. */
-export async function procedureTitles(
-  tenant: Tenant,
-  ids: readonly string[],
-): Promise<Map<string, Task['procedureTitle']>> {
-  if (ids.length === 0) return new Map();
+type Titles = ReadonlyMap<string, Task['procedureTitle']>;
+
+const titleOf = (titles: Titles, { procedureId }: TaskRecord) =>
+  titles.get(procedureId) ?? { en: '', es: '' };
+
+/** What procedures are called in their newest published version; all of them unless told which. */
+async function procedureTitles(tenant: Tenant, ids: readonly string[] | null = null) {
+  if (ids?.length === 0) return new Map<string, Task['procedureTitle']>();
   const rows = await tenant.rows<{ id: string; title: Task['procedureTitle'] }>(
     `SELECT DISTINCT ON (procedure_id) procedure_id AS id, content -> 'title' AS title
-     FROM procedure_versions WHERE procedure_id = ANY($1::uuid[])
+     FROM procedure_versions WHERE $1::uuid[] IS NULL OR procedure_id = ANY($1::uuid[])
      ORDER BY procedure_id, published_at IS NULL, number DESC`,
     [ids],
   );

@@ -1,6 +1,7 @@
 import * as z from 'zod';
 import { isMonth } from '../compliance/month';
 import { endpoint } from '../contract/endpoint';
+import { fileFormat, fileReply } from '../exports/export-format';
 import { windowPlan } from '../programmes/rule-definition';
 import {
   MOST_LISTED,
@@ -48,8 +49,8 @@ export const exportTasks = endpoint({
   path: '/tasks/export',
   summary: 'The tasks of a list, as a file',
   access: 'tasks.read',
-  query: z.strictObject({ ...sorted, format: z.enum(['csv', 'xlsx']) }),
-  reply: z.undefined(),
+  query: z.strictObject({ ...sorted, ...fileFormat }),
+  reply: fileReply,
 });
 
 export const readTask = endpoint({

@@ -77,7 +77,12 @@ export async function makeWork(
     name: `Rule ${rules}`,
     audience,
     applies_to: unitId ? 'unit' : 'store',
-    recurrence: { startsLocal: '2026-01-05T09:00:00', rrules: ['FREQ=WEEKLY'] },
+    recurrence: {
+      startsLocal: '2026-01-05T09:00:00',
+      rrules: ['FREQ=WEEKLY'],
+      rdates: [],
+      exdates: [],
+    },
     time_window: { kind: 'days', before: 2, after: 2, late: 3, dueSoon: 1 },
   });
   const scheduleId = await insert(db, 'schedules', {
