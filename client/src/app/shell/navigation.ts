@@ -79,6 +79,12 @@ export const navigation: readonly NavigationItem[] = [
     icon: 'mail',
     anyOf: ['mail.read'],
   },
+  {
+    path: 'people',
+    label: $localize`:@@people.title:People`,
+    icon: 'people',
+    anyOf: ['people.read'],
+  },
 ];
 
 /** Where each role starts, the broadest role of a person deciding. */
