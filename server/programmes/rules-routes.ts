@@ -3,6 +3,7 @@ import type { Routes } from '../http/routes';
 import { addRule } from './add-rule';
 import { editRule } from './edit-rule';
 import { presentRevisions, presentRuleById } from './present-rule';
+import { previewRuleEdit } from './preview-rule-edit';
 import { rulesToChoose } from './programme-queries';
 import { setRuleRetired } from './set-rule-retired';
 
@@ -26,6 +27,10 @@ export function rulesRoutes(routes: Routes): void {
     await editRule(tenant, actor, { ...body, ...params, now: now() });
     return presentRuleById(tenant, actor, params.id);
   });
+
+  routes.on(contract.previewRuleEdit, ({ tenant, actor, params, body, now }) =>
+    previewRuleEdit(tenant, actor, { ...body, ...params, now: now() }),
+  );
 
   routes.on(contract.retireRule, async ({ tenant, actor, params, body, now }) => {
     await setRuleRetired(tenant, actor, { ...params, ...body, retired: true, now: now() });

@@ -191,6 +191,27 @@ export const editRule = endpoint({
   reply: ruleReply,
 });
 
+export const previewRuleEdit = endpoint({
+  method: 'POST',
+  path: '/rules/:id/preview',
+  summary: 'What a change of a rule would do to its tasks; nothing is changed',
+  access: 'programmes.edit',
+  params: byId,
+  body: ruleDefinition.extend({ version }),
+  reply: z.strictObject({
+    /** Tasks that would be written anew. */
+    added: z.int(),
+    /** Due at the same time, with another window, place, procedure or pair of hands. */
+    moved: z.int(),
+    /** Taken back. */
+    withdrawn: z.int(),
+    /** To come, and the same as before. */
+    unchanged: z.int(),
+    /** Open, deferred or on a published route: they would stay as they are. */
+    leftAlone: z.int(),
+  }),
+});
+
 export const retireRule = endpoint({
   method: 'POST',
   path: '/rules/:id/retire',
@@ -319,6 +340,7 @@ export const programmesEndpoints = [
   readRule,
   addRule,
   editRule,
+  previewRuleEdit,
   retireRule,
   restoreRule,
   listRuleRevisions,

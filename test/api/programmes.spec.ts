@@ -2,6 +2,7 @@ import { randomUUID } from 'node:crypto';
 import type { Role, ScopeKind } from '@shared/access/role';
 import { inTenant } from '@db/tenant-transaction';
 import { syncSchedules } from '@server/programmes/sync-schedules';
+import { generateTasks } from '@server/tasks/generate-tasks';
 import { type Fleet, insert, makeFleet, makePerson } from '@test/factories/organisation-factory';
 import { makeProcedure, ruleOf } from '@test/factories/programme-factory';
 import { type Browser, type TestApp, testApp } from '@test/support/test-app';
@@ -251,6 +252,85 @@ describe('programmes', () => {
           expect.objectContaining({ field: 'recurrence.rrules.1', reason: 'unknown-frequency' }),
         ]),
       );
+    });
+
+    it('are shown what an edit would do to their tasks, which it then does', async () => {
+      const programmeId = await begin();
+      const weekly = (rrule: string, after = 1) => ({
+        recurrence: {
+          startsLocal: '2026-01-05T09:00:00',
+          rrules: [rrule],
+          rdates: [],
+          exdates: [],
+        },
+        window: { kind: 'days', before: 1, after, late: 0, dueSoon: 1 } as const,
+        horizonDays: 27,
+      });
+      const { id, ...rule } = await addRule(programmeId, weekly('FREQ=WEEKLY;BYDAY=TU,SA'));
+      await enrol(programmeId, enrolment('store', fleet.storeId)).expect(200);
+      const now = new Date('2026-12-01T12:00:00Z');
+      const generate = () => generateTasks(it_.db.app, fleet.organisationId, now);
+      await generate();
+      const look = async (more: object, version = 0, browser = administrator) => {
+        const body = { ...rule, ...more, version };
+        return (await browser.post(`/rules/${id}/preview`, body).expect(200)).body as unknown;
+      };
+      // Tuesdays 1, 8, 15 and 22 December, of which the first has opened; Saturdays 5, 12, 19 and 26.
+      expect(await look({ name: 'Another name' })).toEqual({
+        added: 0,
+        moved: 0,
+        withdrawn: 0,
+        unchanged: 7,
+        leftAlone: 1,
+      });
+      expect(await look({ window: { ...rule.window, after: 2 } })).toMatchObject({
+        moved: 7,
+        unchanged: 0,
+      });
+      const edit = { ...rule, ...weekly('FREQ=WEEKLY;BYDAY=SA,SU', 2) };
+      const foreseen = await look(edit);
+      expect(foreseen).toEqual({ added: 4, moved: 4, withdrawn: 3, unchanged: 0, leftAlone: 1 });
+      const { body: before } = await administrator.get(`/rules/${id}`).expect(200);
+      expect(before).toMatchObject({ revision: 1, version: 0 });
+      const kept = await administrator.get(`/rules/${id}/revisions`).expect(200);
+      expect((kept.body as { rows: unknown[] }).rows).toHaveLength(1);
+
+      await administrator.put(`/rules/${id}`, { ...edit, version: 0 }).expect(200);
+      expect(await generate()).toEqual({ added: 4, moved: 4, withdrawn: 3 });
+      expect(await look(edit, 1)).toMatchObject({ added: 0, moved: 0, withdrawn: 0 });
+    });
+
+    it('are shown what leaves when an edit no longer reaches a place', async () => {
+      const programmeId = await begin();
+      const { id, ...rule } = await addRule(programmeId, {
+        recurrence: {
+          startsLocal: '2026-01-05T09:00:00',
+          rrules: ['FREQ=WEEKLY;BYDAY=SA'],
+          rdates: [],
+          exdates: [],
+        },
+        window: { kind: 'days', before: 1, after: 1, late: 0, dueSoon: 1 },
+        horizonDays: 27,
+      });
+      await enrol(programmeId, enrolment('unit', fleet.unitId)).expect(200);
+      await generateTasks(it_.db.app, fleet.organisationId, new Date('2026-12-01T12:00:00Z'));
+      const body = { ...rule, unitKind: 'portable', version: 0 };
+      const { body: seen } = await administrator.post(`/rules/${id}/preview`, body).expect(200);
+      expect(seen).toEqual({ added: 0, moved: 0, withdrawn: 4, unchanged: 0, leftAlone: 0 });
+      expect(await schedules(programmeId)).toHaveLength(1);
+    });
+
+    it('refuse to look ahead for the reasons that the edit itself has', async () => {
+      const programmeId = await begin();
+      const { id, ...rule } = await addRule(programmeId);
+      await enrol(programmeId, enrolment('chain', fleet.chainId)).expect(200);
+      const preview = (browser: Browser, more: object = {}) =>
+        browser.post(`/rules/${id}/preview`, { ...rule, version: 0, ...more });
+      await preview(administrator, { version: 3 }).expect(409);
+      const bad = { ...rule.recurrence, rrules: ['FREQ=MONTHLY;BYMONTHDAY=32'] };
+      await preview(administrator, { recurrence: bad }).expect(422);
+      const region = await as('regional-facility-manager', { kind: 'region', id: fleet.regionId });
+      await preview(region).expect(403);
     });
 
     it('need a published procedure in use, and real dates', async () => {
