@@ -265,6 +265,48 @@ CREATE TABLE public.idempotency_keys (
     created_at timestamp with time zone DEFAULT now() NOT NULL
 );
 
+CREATE TABLE public.import_problems (
+    id bigint NOT NULL,
+    organisation_id uuid NOT NULL,
+    import_id uuid NOT NULL,
+    row_number integer NOT NULL,
+    field text,
+    reason text NOT NULL,
+    value text NOT NULL,
+    params jsonb DEFAULT '{}'::jsonb NOT NULL
+);
+
+ALTER TABLE public.import_problems ALTER COLUMN id ADD GENERATED ALWAYS AS IDENTITY (
+    SEQUENCE NAME public.import_problems_id_seq
+    START WITH 1
+    INCREMENT BY 1
+    NO MINVALUE
+    NO MAXVALUE
+    CACHE 1
+);
+
+CREATE TABLE public.imports (
+    id uuid NOT NULL,
+    organisation_id uuid NOT NULL,
+    kind text NOT NULL,
+    storage_key text NOT NULL,
+    file_name text NOT NULL,
+    file_bytes integer NOT NULL,
+    format text NOT NULL,
+    columns jsonb NOT NULL,
+    date_order text NOT NULL,
+    job_id uuid,
+    checked jsonb,
+    mode text,
+    version integer DEFAULT 0 NOT NULL,
+    created_by uuid NOT NULL,
+    created_at timestamp with time zone DEFAULT now() NOT NULL,
+    CONSTRAINT imports_date_order_check CHECK ((date_order = ANY (ARRAY['mdy'::text, 'dmy'::text]))),
+    CONSTRAINT imports_format_check CHECK ((format = ANY (ARRAY['csv'::text, 'xlsx'::text]))),
+    CONSTRAINT imports_kind_check CHECK ((kind = ANY (ARRAY['chains'::text, 'regions'::text, 'stores'::text, 'units'::text, 'components'::text]))),
+    CONSTRAINT imports_mode_check CHECK ((mode = ANY (ARRAY['all-or-nothing'::text, 'good-rows'::text])))
+);
+
 CREATE TABLE public.inspections (
     id uuid NOT NULL,
     organisation_id uuid NOT NULL,
@@ -705,6 +747,15 @@ ALTER TABLE ONLY public.findings
 ALTER TABLE ONLY public.idempotency_keys
     ADD CONSTRAINT idempotency_keys_pkey PRIMARY KEY (person_id, key);
 
+ALTER TABLE ONLY public.import_problems
+    ADD CONSTRAINT import_problems_pkey PRIMARY KEY (id);
+
+ALTER TABLE ONLY public.imports
+    ADD CONSTRAINT imports_pkey PRIMARY KEY (id);
+
+ALTER TABLE ONLY public.imports
+    ADD CONSTRAINT imports_storage_key_key UNIQUE (storage_key);
+
 ALTER TABLE ONLY public.inspections
     ADD CONSTRAINT inspections_pkey PRIMARY KEY (id);
 
@@ -860,6 +911,10 @@ CREATE INDEX findings_unit_id_found_at_idx ON public.findings USING btree (unit_
 
 CREATE INDEX idempotency_keys_created_at_idx ON public.idempotency_keys USING btree (created_at);
 
+CREATE INDEX import_problems_import_id_row_number_id_idx ON public.import_problems USING btree (import_id, row_number, id);
+
+CREATE INDEX imports_organisation_id_created_at_idx ON public.imports USING btree (organisation_id, created_at DESC);
+
 CREATE INDEX inspections_unit_id_finished_at_idx ON public.inspections USING btree (unit_id, finished_at);
 
 CREATE INDEX letters_next_attempt_at_idx ON public.letters USING btree (next_attempt_at) WHERE (state = 'queued'::text);
@@ -1010,6 +1065,21 @@ ALTER TABLE ONLY public.idempotency_keys
 
 ALTER TABLE ONLY public.idempotency_keys
     ADD CONSTRAINT idempotency_keys_person_id_fkey FOREIGN KEY (person_id) REFERENCES public.people(id);
+
+ALTER TABLE ONLY public.import_problems
+    ADD CONSTRAINT import_problems_import_id_fkey FOREIGN KEY (import_id) REFERENCES public.imports(id) ON DELETE CASCADE;
+
+ALTER TABLE ONLY public.import_problems
+    ADD CONSTRAINT import_problems_organisation_id_fkey FOREIGN KEY (organisation_id) REFERENCES public.organisations(id);
+
+ALTER TABLE ONLY public.imports
+    ADD CONSTRAINT imports_created_by_fkey FOREIGN KEY (created_by) REFERENCES public.people(id);
+
+ALTER TABLE ONLY public.imports
+    ADD CONSTRAINT imports_job_id_fkey FOREIGN KEY (job_id) REFERENCES public.long_jobs(id);
+
+ALTER TABLE ONLY public.imports
+    ADD CONSTRAINT imports_organisation_id_fkey FOREIGN KEY (organisation_id) REFERENCES public.organisations(id);
 
 ALTER TABLE ONLY public.inspections
     ADD CONSTRAINT inspections_organisation_id_fkey FOREIGN KEY (organisation_id) REFERENCES public.organisations(id);
@@ -1210,6 +1280,10 @@ ALTER TABLE public.findings ENABLE ROW LEVEL SECURITY;
 
 ALTER TABLE public.idempotency_keys ENABLE ROW LEVEL SECURITY;
 
+ALTER TABLE public.import_problems ENABLE ROW LEVEL SECURITY;
+
+ALTER TABLE public.imports ENABLE ROW LEVEL SECURITY;
+
 ALTER TABLE public.inspections ENABLE ROW LEVEL SECURITY;
 
 ALTER TABLE public.letters ENABLE ROW LEVEL SECURITY;
@@ -1235,6 +1309,10 @@ CREATE POLICY own_organisation ON public.enrolments USING ((organisation_id = (N
 CREATE POLICY own_organisation ON public.findings USING ((organisation_id = (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid));
 
 CREATE POLICY own_organisation ON public.idempotency_keys USING ((organisation_id = (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid));
+
+CREATE POLICY own_organisation ON public.import_problems USING ((organisation_id = (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid));
+
+CREATE POLICY own_organisation ON public.imports USING ((organisation_id = (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid));
 
 CREATE POLICY own_organisation ON public.inspections USING ((organisation_id = (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid));
 
@@ -1367,6 +1445,10 @@ GRANT SELECT,INSERT,DELETE,UPDATE ON TABLE public.enrolments TO vatwright_app;
 GRANT SELECT,INSERT,DELETE,UPDATE ON TABLE public.findings TO vatwright_app;
 
 GRANT SELECT,INSERT,DELETE,UPDATE ON TABLE public.idempotency_keys TO vatwright_app;
+
+GRANT SELECT,INSERT,DELETE,UPDATE ON TABLE public.import_problems TO vatwright_app;
+
+GRANT SELECT,INSERT,DELETE,UPDATE ON TABLE public.imports TO vatwright_app;
 
 GRANT SELECT,INSERT,DELETE,UPDATE ON TABLE public.inspections TO vatwright_app;
 

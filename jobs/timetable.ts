@@ -1,5 +1,6 @@
 import { rollUpCompliance } from './compliance/roll-up';
 import { makeDigests } from './digests/make-digests';
+import { runLongJobs } from './long-jobs/run-long-jobs';
 import { queueReminders } from './mail/queue-reminders';
 import { sendLetters } from './mail/send-letters';
 import type { WorkerServices } from './services';
@@ -20,5 +21,6 @@ export const timetable: readonly Job[] = [
   { name: 'roll-up-compliance', everySeconds: minutes(5), run: rollUpCompliance },
   { name: 'queue-reminders', everySeconds: minutes(5), run: queueReminders },
   { name: 'make-digests', everySeconds: minutes(15), run: makeDigests },
+  { name: 'long-jobs', everySeconds: 5, run: runLongJobs },
   { name: 'send-letters', everySeconds: 10, run: (services) => sendLetters(services) },
 ];

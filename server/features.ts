@@ -1,6 +1,8 @@
 import { fleetRoutes } from './fleet/fleet-routes';
 import { findingRoutes } from './findings/finding-routes';
+import { importRoutes } from './imports/import-routes';
 import { inspectionRoutes } from './inspections/inspection-routes';
+import { longJobRoutes } from './long-jobs/long-job-routes';
 import { shiftCheckRoutes } from './shift-checks/shift-check-routes';
 import { proceduresRoutes } from './procedures/procedures-routes';
 import { programmesRoutes } from './programmes/programmes-routes';
@@ -22,6 +24,8 @@ export function registerFeatures(routes: Routes): void {
   signInRoutes(routes);
   peopleRoutes(routes);
   fleetRoutes(routes);
+  importRoutes(routes);
+  longJobRoutes(routes);
   proceduresRoutes(routes);
   programmesRoutes(routes);
   rulesRoutes(routes);

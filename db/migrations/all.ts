@@ -12,6 +12,7 @@ import { createCompliance } from './20261201091000-create-compliance';
 import { createAudit } from './20261201091100-create-audit';
 import { createWorkRecords } from './20261201091200-create-work-records';
 import { createRateLimits } from './20261201091300-create-rate-limits';
+import { createImports } from './20261201091400-create-imports';
 import type { Migration } from './migration';
 
 /** Every migration in order. A list, as file patterns do not survive bundling. */
@@ -30,4 +31,5 @@ export const migrations: readonly Migration[] = [
   createAudit,
   createWorkRecords,
   createRateLimits,
+  createImports,
 ];

@@ -20,7 +20,7 @@ export async function* readXlsx(bytes: Buffer): AsyncGenerator<TableRow> {
   let format = 0;
   let value = '';
   let reading = false;
-  const events = xmlEvents(archive.chunks(book.sheet), {
+  const events = xmlEvents(archive.chunks(book.sheet, importLimits.unpackedBytes), {
     open: (name, attributes) => {
       if (name === 'row') {
         number = Number(attributes['r'] ?? number + 1);

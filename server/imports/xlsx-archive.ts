@@ -9,6 +9,9 @@ const damaged = () =>
 /** Parts of a real workbook number in the dozens. */
 const ENTRIES = 2_000;
 
+/** Bytes of a part that is kept in memory while the sheet is read. */
+const KEPT = 64_000_000;
+
 /**
  * The parts of an XLSX file. What comes out is counted as it is unpacked, so that a file that blows up
  * is refused whatever it says of itself.
@@ -44,7 +47,8 @@ export class XlsxArchive {
    * A part's bytes, chunk by chunk.
    * @throws Problem 422 when the part is missing, damaged, or more than is taken in
    */
-  async *chunks(name: string): AsyncGenerator<Buffer> {
+  async *chunks(name: string, maxBytes = KEPT): AsyncGenerator<Buffer> {
+    let ofPart = 0;
     const entry = this.entries.get(name);
     if (!entry) throw damaged();
     const stream = await new Promise<Readable>((done, fail) =>
@@ -53,7 +57,8 @@ export class XlsxArchive {
     try {
       for await (const chunk of stream) {
         this.unpacked += (chunk as Buffer).length;
-        if (this.unpacked > importLimits.unpackedBytes) {
+        ofPart += (chunk as Buffer).length;
+        if (this.unpacked > importLimits.unpackedBytes || ofPart > maxBytes) {
           throw unreadable('It is too large once unpacked. Split it, or save it as CSV.');
         }
         yield chunk as Buffer;

@@ -32,7 +32,6 @@ export const importFields = {
       'number',
       'site',
       'site number',
-      'unit number',
       'restaurant number',
       'local',
       'tienda',
