@@ -9,7 +9,7 @@ import {
   formatRate,
 } from '../mail/format-moment';
 import type { Locale } from '../mail/locale';
-import { formatChange } from './format-change';
+import { formatChange, formatPoints } from './format-change';
 import type { DigestContent } from './digest-content';
 import { digestWords } from './digest-words';
 import { storesToDecide } from './stores-to-decide';
@@ -118,7 +118,7 @@ function months({ content, locale }: Writing): Block[] {
     { kind: 'heading', text: its.months },
     {
       kind: 'table',
-      caption: its.months,
+      caption: its.monthsCaption,
       columns: rateColumns(its.month, locale),
       rows: content.months.map(({ month, counts, rate }) => [
         formatMonth(month, locale),
@@ -138,8 +138,8 @@ function stores({ content, locale, mostRows }: Writing): Block[] {
     { kind: 'heading', text: its.stores },
     {
       kind: 'table',
-      caption: its.stores,
-      columns: [...rateColumns(its.store, locale), { label: its.change, numeric: true }],
+      caption: its.storesCaption,
+      columns: [...rateColumns(its.store, locale), { label: its.changeColumn, numeric: true }],
       rows: content.stores
         .slice(0, mostRows)
         .map((store) => [
@@ -148,7 +148,7 @@ function stores({ content, locale, mostRows }: Writing): Block[] {
           ofCounted(store.counts, locale),
           formatCount(store.counts.late, locale),
           formatCount(store.counts.notDone, locale),
-          formatChange(store.change, locale),
+          formatPoints(store.change, locale),
         ]),
     },
     ...rest(content.stores.length - mostRows, locale),
@@ -176,7 +176,7 @@ function overdue({ content, locale, mostRows }: Writing): Block[] {
     heading,
     {
       kind: 'table',
-      caption: its.overdueTitle,
+      caption: its.overdueCaption,
       columns: [
         { label: its.store, numeric: false },
         { label: its.count, numeric: true },
@@ -204,10 +204,10 @@ function findings({ content, locale }: Writing): Block[] {
     heading,
     {
       kind: 'table',
-      caption: its.findingsTitle,
+      caption: its.findingsCaption,
       columns: [
         { label: its.cause, numeric: false },
-        numeric(its.findings),
+        numeric(its.findingsColumn),
         numeric(its.stop),
         numeric(its.unsettled),
       ],
@@ -228,6 +228,7 @@ function repairs({ content, locale }: Writing): Block[] {
     count === 0
       ? its.repairsNone
       : its.repairs(
+          count,
           formatCount(count, locale),
           formatCents(partsCents, locale),
           formatCents(labourCents, locale),

@@ -24,23 +24,29 @@ interface DigestWords {
   lowTitle: string;
   low(store: string, rate: string, counts: string): string;
   months: string;
+  monthsCaption: string;
   month: string;
   stores: string;
+  storesCaption: string;
   store: string;
   rate: string;
   late: string;
+  changeColumn: string;
   of(onTime: string, counted: string): string;
   overdueTitle: string;
+  overdueCaption: string;
   overdueNone: string;
   count: string;
   oldest: string;
   findingsTitle: string;
+  findingsCaption: string;
+  findingsColumn: string;
   findingsNone: string;
   cause: string;
   stop: string;
   unsettled: string;
   repairsTitle: string;
-  repairs(count: string, parts: string, labour: string): string;
+  repairs(count: number, written: string, parts: string, labour: string): string;
   repairsNone: string;
   more(count: string): string;
   definition: string;
@@ -60,7 +66,7 @@ const en: DigestWords = {
   points: (signed) => `${signed} points`,
   noChange: 'no change',
   overdue: 'overdue at the month’s end',
-  notDone: 'not done in their window',
+  notDone: 'Not done',
   findings: 'findings',
   cost: 'parts and labor',
   decide: 'What to decide',
@@ -70,23 +76,30 @@ const en: DigestWords = {
   lowTitle: 'Stores with fewer than four of five tasks on time',
   low: (store, rate, counts) => `${store}: ${rate} (${counts})`,
   months: 'Month by month',
+  monthsCaption: 'Tasks whose window closed in each month',
   month: 'Month',
   stores: 'Stores, lowest rate first',
+  storesCaption: 'Tasks whose window closed in the month; change in percentage points',
   store: 'Store',
   rate: 'On time',
   late: 'Late',
+  changeColumn: 'Change',
   of: (onTime, counted) => `${onTime} of ${counted}`,
   overdueTitle: 'Overdue at the month’s end',
+  overdueCaption: 'Tasks past their window that could still be done late',
   overdueNone: 'No task was overdue as the month ended.',
   count: 'Tasks',
   oldest: 'Oldest window closed',
   findingsTitle: 'Findings by cause',
+  findingsCaption: 'Findings written down in the month',
+  findingsColumn: 'Findings',
   findingsNone: 'No findings were written down in this month.',
   cause: 'Cause',
   stop: 'Stop using it',
   unsettled: 'Not settled',
   repairsTitle: 'Repairs',
-  repairs: (count, parts, labour) => `${count}; parts ${parts}, labor ${labour}.`,
+  repairs: (count, written, parts, labour) =>
+    `${count === 1 ? '1 repair' : `${written} repairs`}: parts ${parts}, labor ${labour}.`,
   repairsNone: 'No repairs were recorded in this month.',
   more: (count) => `and ${count} more`,
   definition:
@@ -108,7 +121,7 @@ const es: DigestWords = {
   points: (signed) => `${signed} puntos`,
   noChange: 'sin cambio',
   overdue: 'vencidas al cierre del mes',
-  notDone: 'no hechas en su ventana',
+  notDone: 'No hechas',
   findings: 'hallazgos',
   cost: 'repuestos y mano de obra',
   decide: 'Lo que hay que decidir',
@@ -119,23 +132,30 @@ const es: DigestWords = {
   lowTitle: 'Tiendas con menos de cuatro de cada cinco tareas a tiempo',
   low: (store, rate, counts) => `${store}: ${rate} (${counts})`,
   months: 'Mes a mes',
+  monthsCaption: 'Tareas cuya ventana cerró en cada mes',
   month: 'Mes',
   stores: 'Tiendas, de menor a mayor porcentaje',
+  storesCaption: 'Tareas cuya ventana cerró en el mes; cambio en puntos porcentuales',
   store: 'Tienda',
   rate: 'A tiempo',
   late: 'Tarde',
+  changeColumn: 'Cambio',
   of: (onTime, counted) => `${onTime} de ${counted}`,
   overdueTitle: 'Vencidas al cierre del mes',
+  overdueCaption: 'Tareas con la ventana cerrada que todavía podían hacerse con retraso',
   overdueNone: 'Ninguna tarea estaba vencida al cerrar el mes.',
   count: 'Tareas',
   oldest: 'Ventana más antigua cerrada',
   findingsTitle: 'Hallazgos por causa',
+  findingsCaption: 'Hallazgos anotados en el mes',
+  findingsColumn: 'Hallazgos',
   findingsNone: 'No se anotaron hallazgos este mes.',
   cause: 'Causa',
   stop: 'Dejar de usar',
   unsettled: 'Sin resolver',
   repairsTitle: 'Reparaciones',
-  repairs: (count, parts, labour) => `${count}; repuestos ${parts}, mano de obra ${labour}.`,
+  repairs: (count, written, parts, labour) =>
+    `${count === 1 ? '1 reparación' : `${written} reparaciones`}: repuestos ${parts}, mano de obra ${labour}.`,
   repairsNone: 'No se registraron reparaciones este mes.',
   more: (count) => `y ${count} más`,
   definition:

@@ -25,24 +25,26 @@ export function blockAsMjml(block: Block): string {
 }
 
 function figures({ figures: all }: Of<'figures'>): string {
+  // Blocks in a line, not cells of a table: on a phone they go below each other, and none breaks.
   const cells = all.map(
     ({ value, label, tone }) =>
-      `<td style="padding:4px 22px 4px 0;vertical-align:top"><div class="${tone === 'alert' ? 'alert' : 'ink'}" style="font-size:27px;line-height:34px;color:${light(tone === 'alert' ? 'alert' : 'ink')}">${esc(value)}</div><div class="ink2" style="font-size:14px;line-height:18px;color:${light('ink2')}">${esc(label)}</div></td>`,
+      `<div style="display:inline-block;vertical-align:top;min-width:84px;max-width:150px;padding:4px 22px 6px 0"><div class="${tone === 'alert' ? 'alert' : 'ink'}" style="font-size:25px;line-height:32px;white-space:nowrap;color:${light(tone === 'alert' ? 'alert' : 'ink')}">${esc(value)}</div><div class="ink2" style="font-size:14px;line-height:18px;color:${light('ink2')}">${esc(label)}</div></div>`,
   );
-  // A layout, not data: screen readers are told so.
-  return `<mj-table role="presentation"><tr>${cells.join('')}</tr></mj-table>`;
+  return `<mj-text css-class="ink">${cells.join('')}</mj-text>`;
 }
 
 function table({ caption, columns, rows }: Of<'table'>): string {
   const align = (index: number) => (columns[index]?.numeric ? 'right' : 'left');
+  // Figures stay whole; names may take two lines.
+  const unbroken = (index: number) => (columns[index]?.numeric ? 'white-space:nowrap;' : '');
   const head = columns.map(
     ({ label }, index) =>
-      `<th scope="col" class="ink2 line" style="text-align:${align(index)};padding:4px 8px 4px 0;font-size:13px;font-weight:600;color:${light('ink2')};border-bottom:1px solid ${light('line')}">${esc(label)}</th>`,
+      `<th scope="col" class="ink2 line" style="text-align:${align(index)};word-break:normal;vertical-align:bottom;padding:4px 5px 4px 0;font-size:13px;font-weight:600;color:${light('ink2')};border-bottom:1px solid ${light('line')}">${esc(label)}</th>`,
   );
   const body = rows.map((row) => {
     const cells = row.map(
       (cell, index) =>
-        `<td class="ink line" style="text-align:${align(index)};padding:6px 8px 6px 0;vertical-align:top;border-bottom:1px solid ${light('line')}">${esc(cell)}</td>`,
+        `<td class="ink line" style="text-align:${align(index)};${unbroken(index)}padding:6px 5px 6px 0;vertical-align:top;border-bottom:1px solid ${light('line')}">${esc(cell)}</td>`,
     );
     return `<tr>${cells.join('')}</tr>`;
   });

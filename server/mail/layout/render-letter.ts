@@ -74,6 +74,6 @@ const darkStyle = `
     .ink2, .ink2 div, .ink .ink2 { color: ${dark('ink2')} !important; }
     .line { border-color: ${dark('line')} !important; }
     .brand div, .ink a.link { color: ${dark('kelp')} !important; }
-    .alert { color: ${dark('alert')} !important; }
+    .alert, .ink .alert { color: ${dark('alert')} !important; }
     .button a, .button td { background: ${dark('kelp')} !important; color: ${dark('onKelp')} !important; }
   }`;
