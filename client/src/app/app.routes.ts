@@ -25,6 +25,7 @@ const features: Routes = [
   { path: 'compliance', loadChildren: () => import('./compliance/compliance.routes') },
   { path: 'digests', loadChildren: () => import('./digests/digests.routes') },
   { path: 'letters', loadChildren: () => import('./letters/letters.routes') },
+  { path: 'visits', loadChildren: () => import('./visits/visits.routes') },
   { path: 'people', loadChildren: () => import('./people/people.routes') },
   { path: 'account', loadChildren: () => import('./sign-in/account.routes') },
 ];

@@ -38,6 +38,12 @@ export const navigation: readonly NavigationItem[] = [
     anyOf: ['board.read', 'tasks.do', 'compliance.read'],
   },
   {
+    path: 'visits',
+    label: $localize`:@@visits.title:Visits`,
+    icon: 'route',
+    anyOf: ['visits.read'],
+  },
+  {
     path: 'fleet',
     label: $localize`:@@fleet.title:Fleet`,
     icon: 'store',
