@@ -18,7 +18,10 @@ export const phone = { width: 390, height: 844 };
 
 /** Debian's Chromium; playwright's own download is not used. */
 export const openBrowser = (): Promise<Browser> =>
-  chromium.launch({ executablePath: '/usr/bin/chromium', args: flags });
+  chromium.launch({
+    executablePath: process.env['CHROMIUM_PATH'] || '/usr/bin/chromium',
+    args: flags,
+  });
 
 export interface Visitor {
   readonly context: BrowserContext;
