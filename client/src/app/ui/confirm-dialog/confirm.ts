@@ -27,15 +27,18 @@ export class Confirm {
 
   /** Emits once: the answer, or null for no. */
   ask(question: Question): Observable<Answer | null> {
-    return this.dialog
-      .open<ConfirmDialog, Question, Answer>(ConfirmDialog, {
-        data: question,
-        width: '28rem',
-        maxWidth: 'calc(100vw - 32px)',
-        autoFocus: question.reason ? 'textarea' : '[data-no]',
-        role: 'alertdialog',
-      })
-      .afterClosed()
-      .pipe(map((answer) => answer ?? null));
+    return (
+      this.dialog
+        .open<ConfirmDialog, Question, Answer>(ConfirmDialog, {
+          data: question,
+          width: '28rem',
+          maxWidth: 'calc(100vw - 32px)',
+          autoFocus: question.reason ? 'textarea' : '[data-no]',
+          role: 'alertdialog',
+        })
+        .afterClosed()
+        // A button that only closes the dialog answers with an empty text.
+        .pipe(map((answer) => answer || null))
+    );
   }
 }
