@@ -24,7 +24,11 @@ export function inTenant<T>(
   return sequelize.transaction(async (transaction) => {
     const rows: Tenant['rows'] = <R extends object>(sql: string, values: unknown[] = []) =>
       sequelize.query<R>(sql, { bind: values, transaction, type: QueryTypes.SELECT });
-    await rows(`SELECT set_config('app.organisation_id', $1, true)`, [organisationId]);
+    // Compiling a statement costs seconds where it spans the months of tasks, and running it does not.
+    await rows(
+      `SELECT set_config('app.organisation_id', $1, true), set_config('jit', 'off', true)`,
+      [organisationId],
+    );
     return work({
       organisationId,
       sequelize,

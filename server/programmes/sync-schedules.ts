@@ -33,6 +33,11 @@ export async function syncSchedules(
     // The whole organisation may have hundreds of thousands of schedules.
     await tenant.rows(`SELECT set_config('statement_timeout', '120000', true)`);
   }
+  if (!scope.storeIds) {
+    // The planner takes the sets below for a row or two each and would loop over thousands by
+    // thousands, above all in a fleet that has just come in and was never analysed.
+    await tenant.rows(`SELECT set_config('enable_nestloop', 'off', true)`);
+  }
   await tenant.rows(`SELECT pg_advisory_xact_lock(hashtextextended($1, 0))`, [
     `schedules ${tenant.organisationId}`,
   ]);
@@ -115,5 +120,6 @@ export async function syncSchedules(
        (SELECT count(*)::int FROM ended) AS ended`,
     binds.values,
   );
+  if (!scope.storeIds) await tenant.rows(`SELECT set_config('enable_nestloop', 'on', true)`);
   return counted ?? { made: 0, changed: 0, ended: 0 };
 }

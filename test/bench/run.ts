@@ -1,8 +1,14 @@
 // `npm run bench -- NAME [--json]`: measures one part of the product against its bar.
 import { type BenchReport, benchTable } from './bench-report';
+import { benchGeneration } from './generation';
+import { benchLists } from './lists';
 import { benchRecurrence } from './recurrence';
 
-const BENCHES: Readonly<Record<string, () => BenchReport | Promise<BenchReport>>> = {
+const BENCHES: Readonly<
+  Record<string, (args: readonly string[]) => BenchReport | Promise<BenchReport>>
+> = {
+  generation: benchGeneration,
+  lists: benchLists,
   recurrence: benchRecurrence,
 };
 
@@ -14,7 +20,7 @@ async function main(args: readonly string[]): Promise<number> {
     process.stderr.write(`Usage: npm run bench -- ${names} [--json]\n`);
     return 2;
   }
-  const report = await bench();
+  const report = await bench(args.slice(1));
   process.stdout.write(
     args.includes('--json') ? `${JSON.stringify(report)}\n` : `${benchTable(report)}\n`,
   );

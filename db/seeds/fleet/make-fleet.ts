@@ -51,11 +51,15 @@ export async function makeFleet(
   });
   tell('places, people and rules');
   const places = fleetPlaces(stores, random, today);
-  await inTenant(app, organisationId, async (tenant) => {
+  const administrator = await inTenant(app, organisationId, async (tenant) => {
     for (const table of ['chains', 'regions', 'stores', 'units', 'components'] as const) {
       await insertRows(tenant, table, places.rows[table]);
     }
-    const [administrator] = await seedFleetPeople(tenant, places, domain, random);
+    const [founder] = await seedFleetPeople(tenant, places, domain, random);
+    return founder;
+  });
+  await owner.query('ANALYZE');
+  await inTenant(app, organisationId, async (tenant) => {
     const scope = { scopeKind: 'organisation', scopeId: organisationId } as const;
     const founder: Actor = {
       personId: administrator?.id ?? '',
