@@ -13,6 +13,9 @@ export const placeKeys = [
   'audience',
 ] as const;
 
+/** On the board, which shows technicians' tasks unless it is asked otherwise: store staff's too. */
+export const EVERYBODY = 'everybody';
+
 export type Change = Readonly<Record<string, string | number | null>>;
 
 /**
@@ -28,9 +31,10 @@ export class Address {
   });
 
   /** The filters by place and hand; absent ones are undefined. */
-  readonly place = computed(() =>
-    Object.fromEntries(placeKeys.map((key) => [key, this.get(key) || undefined])),
-  );
+  readonly place = computed((): Readonly<Record<string, string | undefined>> => {
+    const place = Object.fromEntries(placeKeys.map((key) => [key, this.get(key) || undefined]));
+    return place['audience'] === EVERYBODY ? { ...place, audience: undefined } : place;
+  });
 
   get(key: string): string {
     return this.query().get(key) ?? '';

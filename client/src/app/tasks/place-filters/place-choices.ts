@@ -2,7 +2,7 @@ import { computed, inject, Injectable } from '@angular/core';
 import { dateAt } from '@shared/calendar/instant-of';
 import { Session } from '../../session/session';
 import type { FilterOption } from '../../ui/filter-bar/filter-select';
-import { Address } from '../address';
+import { Address, EVERYBODY } from '../address';
 import { TasksApi } from '../tasks-api';
 
 /** What the filters by place and hand can be set to, and the names of what is set. */
@@ -32,6 +32,7 @@ export class PlaceChoices {
   readonly audiences: readonly FilterOption[] = [
     { value: 'technician', label: $localize`:@@tasks.audience.technician:technicians` },
     { value: 'store', label: $localize`:@@tasks.audience.store:store staff` },
+    { value: EVERYBODY, label: $localize`:@@tasks.audience.everybody:everybody` },
   ];
   /** Number and name of the store that is filtered by; empty without one. */
   readonly storeName = computed(() => {

@@ -2,7 +2,7 @@ import { ChangeDetectionStrategy, Component, computed, inject, input } from '@an
 import type { SetFilter } from '../../ui/filter-bar/filter-bar';
 import { FilterBar } from '../../ui/filter-bar/filter-bar';
 import { FilterSelect } from '../../ui/filter-bar/filter-select';
-import { Address } from '../address';
+import { Address, EVERYBODY } from '../address';
 import { PlaceChoices } from './place-choices';
 import { StoreFilter } from './store-filter';
 
@@ -59,8 +59,9 @@ import { StoreFilter } from './store-filter';
       <vw-filter-select
         i18n-label="@@tasks.filter.audience"
         label="Whose hands"
-        [options]="choices.audiences"
-        [value]="address.get('audience')"
+        [options]="audiences()"
+        [all]="usualAudience().label"
+        [value]="audience()"
         (chosen)="address.ask({ audience: $event || null })"
       />
       <ng-content />
@@ -73,9 +74,25 @@ export class PlaceFilters {
   protected readonly address = inject(Address);
   protected readonly choices = inject(PlaceChoices);
 
+  /** Whose tasks the page shows when nothing is said: the value of a choice. */
+  readonly usual = input(EVERYBODY);
   /** Filters of the page itself that are set. */
   readonly more = input<readonly SetFilter[]>([]);
 
+  protected readonly audiences = computed(() =>
+    this.choices.audiences.filter(({ value }) => value !== this.usual()),
+  );
+  protected readonly usualAudience = computed(
+    () =>
+      this.choices.audiences.find(({ value }) => value === this.usual()) ?? {
+        value: '',
+        label: '',
+      },
+  );
+  protected readonly audience = computed(() => {
+    const asked = this.address.get('audience');
+    return asked === this.usual() ? '' : asked;
+  });
   protected readonly set = computed(() => [...this.choices.set(), ...this.more()]);
 
   protected remove(key: string): void {

@@ -66,7 +66,11 @@ export class TaskBoard {
     return isCalendarDate(asked) ? asked : undefined;
   });
   protected readonly sort = computed(() => this.address.get('sort') || 'number');
-  private readonly place = computed(() => this.address.place() as Partial<BoardQuery>);
+  /** A store's daily checks would hide the visits that are planned here: they come when asked for. */
+  private readonly place = computed((): Partial<BoardQuery> => {
+    const place = this.address.place() as Partial<BoardQuery>;
+    return this.address.get('audience') ? place : { ...place, audience: 'technician' };
+  });
   protected readonly resource = inject(TasksApi).board(() => ({
     ...this.place(),
     from: this.from(),

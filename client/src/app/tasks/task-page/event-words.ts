@@ -3,8 +3,8 @@ export function eventWords(action: string): string {
   switch (action) {
     case 'assigned':
       return $localize`:@@tasks.event.assigned:assigned`;
-    case 'unassigned':
-      return $localize`:@@tasks.event.unassigned:taken from the technician`;
+    case 'change-taken-back':
+      return $localize`:@@tasks.event.taken-back:change taken back`;
     case 'excused':
       return $localize`:@@tasks.event.excused:excused`;
     case 'deferred':

@@ -17,7 +17,6 @@ export const taskColumns = (
     key: 'visit',
     label: $localize`:@@tasks.col.visit:On a route`,
     choice: 'on',
-    phone: 'none',
     text: (task) => task.visitOn && dayText(task.visitOn, locale),
   },
   {
