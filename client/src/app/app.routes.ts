@@ -18,7 +18,6 @@ const features: Routes = [
   // Short addresses for letters, labels and links from other features.
   { path: 'stores/:id', redirectTo: 'fleet/stores/:id' },
   { path: 'units/:id', redirectTo: 'fleet/units/:id' },
-  { path: 'imports', loadChildren: () => import('./imports/imports.routes') },
   { path: 'procedures', loadChildren: () => import('./procedures/procedures.routes') },
   { path: 'programmes', loadChildren: () => import('./programmes/programmes.routes') },
   { path: 'findings', loadChildren: () => import('./findings/findings.routes') },

@@ -16,6 +16,7 @@ import type {
   restoreStore,
   retireStore,
 } from '@shared/fleet/stores-contract';
+import type { listPeople } from '@shared/people/people-contract';
 import type { Asked } from '../api/api';
 import { Api } from '../api/api';
 
@@ -27,6 +28,8 @@ export type StoreQuery = NonNullable<Asked<typeof listStores>['query']>;
 export type Store = ReplyOf<typeof readStore>;
 export type StoreBody = Omit<BodyOf<typeof createStore>, 'id'>;
 export type PlaceQuery = NonNullable<Asked<typeof locateStore>['query']>;
+export type PersonRow = ReplyOf<typeof listPeople>['rows'][number];
+export type PeopleQuery = NonNullable<Asked<typeof listPeople>['query']>;
 export type FoundPlace = NonNullable<ReplyOf<typeof locateStore>['place']>;
 
 /** What the pages ask of the server about chains, regions and stores. */
@@ -102,6 +105,10 @@ export class FleetApi {
       params: { id },
       body: { ...body, version },
     });
+  }
+
+  people(query: PeopleQuery) {
+    return this.api.call<typeof listPeople>('GET', '/people', { query });
   }
 
   setStoreRetired({ id, version }: Pick<Store, 'id' | 'version'>, retired: boolean) {

@@ -77,6 +77,7 @@ const routes: Routes = [
     ...reading,
     loadComponent: groups,
   },
+  { path: 'imports', loadChildren: () => import('../imports/imports.routes') },
 ];
 
 export default routes;

@@ -62,7 +62,7 @@ export class FleetTabs {
     { path: '/fleet/chains', label: $localize`:@@fleet.chains:Chains` },
     { path: '/fleet/regions', label: $localize`:@@fleet.regions:Regions` },
     ...(inject(Session).can('fleet.import')
-      ? [{ path: '/imports', label: $localize`:@@fleet.imports:Imports` }]
+      ? [{ path: '/fleet/imports', label: $localize`:@@fleet.imports:Imports` }]
       : []),
   ];
 }

@@ -11,6 +11,7 @@ import {
 import { MatButton } from '@angular/material/button';
 import { RouterLink } from '@angular/router';
 import { ProblemView } from '../../problems/problem-view';
+import { Session } from '../../session/session';
 import { PageTitle } from '../../shell/page-title';
 import { Figure } from '../../ui/figure/figure';
 import { Icon } from '../../ui/icon/icon';
@@ -22,6 +23,7 @@ import { FleetApi } from '../fleet-api';
 import { fleetFaultLine, isConflict } from '../fleet-problem';
 import { storeTitle } from '../fleet-words';
 import { WeekHours } from '../store-hours/week-hours';
+import { StorePeople } from './store-people';
 import { StoreUnits } from './store-units';
 import { StoreWhere } from './store-where';
 
@@ -37,6 +39,7 @@ import { StoreWhere } from './store-where';
     PageLoading,
     ProblemView,
     RouterLink,
+    StorePeople,
     StoreUnits,
     StoreWhere,
     WeekHours,
@@ -48,6 +51,8 @@ import { StoreWhere } from './store-where';
 export class StorePage {
   private readonly api = inject(FleetApi);
   private readonly notices = inject(Notices);
+
+  protected readonly mayReadPeople = inject(Session).can('people.read');
 
   readonly id = input.required<string>();
 

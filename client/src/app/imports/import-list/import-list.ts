@@ -81,5 +81,5 @@ export class ImportList {
     { key: 'at', label: $localize`:@@imports.col.at:Sent` },
   ];
   protected readonly id = (row: ImportRow): string => row.id;
-  protected readonly link = (row: ImportRow): readonly unknown[] => ['/imports', row.id];
+  protected readonly link = (row: ImportRow): readonly unknown[] => ['/fleet/imports', row.id];
 }

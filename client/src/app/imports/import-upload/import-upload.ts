@@ -83,7 +83,7 @@ export class ImportUpload {
     this.fault.set('');
     this.sending.set(true);
     this.api.upload(newId(), this.chosen(), file).subscribe({
-      next: ({ id }) => void this.router.navigate(['/imports', id], { replaceUrl: true }),
+      next: ({ id }) => void this.router.navigate(['/fleet/imports', id], { replaceUrl: true }),
       error: (failure: unknown) => {
         this.sending.set(false);
         const problem = toProblem(failure);
