@@ -1,6 +1,7 @@
 // `npm run bench -- NAME [--json]`: measures one part of the product against its bar.
 import { type BenchReport, benchTable } from './bench-report';
 import { benchGeneration } from './generation';
+import { benchImport } from './import';
 import { benchLists } from './lists';
 import { benchRecurrence } from './recurrence';
 
@@ -8,6 +9,7 @@ const BENCHES: Readonly<
   Record<string, (args: readonly string[]) => BenchReport | Promise<BenchReport>>
 > = {
   generation: benchGeneration,
+  import: benchImport,
   lists: benchLists,
   recurrence: benchRecurrence,
 };
