@@ -17,7 +17,7 @@ import type { Import } from '../imports-api';
               {{ index + 1 }}
             }
           </span>
-          {{ step }}
+          <span class="word">{{ step }}</span>
           @if (index < now()) {
             <span class="vw-hidden" i18n="@@imports.step.done">(done)</span>
           }
@@ -66,6 +66,16 @@ import type { Import } from '../imports-api';
     .dot vw-icon {
       width: 14px;
       height: 14px;
+    }
+    @media (width < 480px) {
+      li:not([aria-current]) .word {
+        position: absolute;
+        width: 1px;
+        height: 1px;
+        overflow: hidden;
+        clip-path: inset(50%);
+        white-space: nowrap;
+      }
     }
   `,
   changeDetection: ChangeDetectionStrategy.OnPush,
