@@ -11,6 +11,7 @@ import type {
   findPlaces,
   listProgrammes,
   listRuleRevisions,
+  previewRuleEdit,
   readProgramme,
   readRule,
   restoreProgramme,
@@ -30,6 +31,7 @@ export type Rule = ReplyOf<typeof readRule>;
 export type Enrolment = Programme['enrolments'][number];
 export type ScopeKind = Enrolment['scopeKind'];
 export type Reach = Programme['reach'];
+export type RuleEffect = ReplyOf<typeof previewRuleEdit>;
 export type ProcedureChoice = ReplyOf<typeof listProcedures>['rows'][number];
 export type PlaceToEnrol = ReplyOf<typeof findPlaces>['rows'][number];
 
@@ -109,6 +111,14 @@ export class ProgrammesApi {
 
   editRule(id: string, version: number, rule: RuleDefinition) {
     return this.api.call<typeof editRule>('PUT', '/rules/:id', {
+      params: { id },
+      body: { version, ...rule },
+    });
+  }
+
+  /** What an edit would do to the rule's tasks; changes nothing. */
+  previewEdit(id: string, version: number, rule: RuleDefinition) {
+    return this.api.call<typeof previewRuleEdit>('POST', '/rules/:id/preview', {
       params: { id },
       body: { version, ...rule },
     });

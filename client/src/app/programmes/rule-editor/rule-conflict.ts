@@ -4,6 +4,12 @@ import type { RuleDefinition } from '@shared/programmes/rule-definition';
 import type { Rule } from '../programmes-api';
 import { RuleChanges } from '../rule-changes/rule-changes';
 
+/** What somebody else saved, and what stands in the form. */
+export interface Conflict {
+  readonly theirs: Rule;
+  readonly mine: RuleDefinition;
+}
+
 /** Both sides of a rule that two people changed at once, and the choice between them. */
 @Component({
   selector: 'vw-rule-conflict',

@@ -9,6 +9,7 @@ import {
 } from '@angular/core';
 import { ReactiveFormsModule } from '@angular/forms';
 import { MatButton } from '@angular/material/button';
+import { MatDialog } from '@angular/material/dialog';
 import { Router } from '@angular/router';
 import { dateAt } from '@shared/calendar/instant-of';
 import type { RuleDefinition } from '@shared/programmes/rule-definition';
@@ -29,11 +30,17 @@ import { PageLoading } from '../../ui/page-states/page-loading';
 import type { Rule } from '../programmes-api';
 import { ProgrammesApi } from '../programmes-api';
 import { RuleHistory } from '../rule-history/rule-history';
+import type { EditToJudge } from './edit-preview';
+import { EditPreview } from './edit-preview';
+import { procedureTitles } from './procedure-titles';
+import type { Conflict } from './rule-conflict';
 import { RuleConflict } from './rule-conflict';
 import { RuleFields } from './rule-fields';
 import { definitionOf, newDefinition, ruleForm } from './rule-form';
 import { ruleLabels, showRuleFaults } from './rule-labels';
 import { RuleView } from './rule-view';
+
+type Base = Pick<Rule, 'id' | 'version'>;
 
 /** One rule: what it says, in a form for those who may change it, and what it said before. */
 @Component({
@@ -59,6 +66,7 @@ import { RuleView } from './rule-view';
 export class RuleEditor implements HoldsWork {
   private readonly api = inject(ProgrammesApi);
   private readonly router = inject(Router);
+  private readonly dialog = inject(MatDialog);
   private readonly notices = inject(Notices);
   private readonly session = inject(Session);
   protected readonly language = inject(LanguageChoice).current;
@@ -84,26 +92,20 @@ export class RuleEditor implements HoldsWork {
       (this.ruleId() ? this.known()?.mayEdit : undefined) ??
       (this.programme.hasValue() && this.programme.value().mayEdit),
   );
-  protected readonly programmeName = computed(() =>
-    this.programme.hasValue() ? this.programme.value().name : '',
-  );
   protected readonly form = signal(
     ruleForm(newDefinition(dateAt(Date.now(), this.session.timeZone()))),
   );
-  private readonly filledFrom = signal<{ readonly id: string; readonly version: number } | null>(
-    null,
-  );
+  /** The rule and version that the form was filled from; null for a new rule. */
+  private readonly filledFrom = signal<Base | null>(null);
   protected readonly ready = computed(() =>
     this.ruleId() ? this.filledFrom() !== null : this.programme.hasValue(),
   );
-  protected readonly titles = computed(() => {
-    const { rows } = this.procedures.hasValue() ? this.procedures.value() : { rows: [] };
-    const rule = this.known();
-    return new Map([
-      ...(rule ? [[rule.procedureId, rule.procedureTitle[this.language]] as const] : []),
-      ...rows.map(({ id, title }) => [id, title[this.language]] as const),
-    ]);
-  });
+  protected readonly choices = computed(() =>
+    this.procedures.hasValue() ? this.procedures.value().rows : [],
+  );
+  protected readonly titles = computed(() =>
+    procedureTitles(this.choices(), this.known(), this.language),
+  );
 
   protected readonly busy = signal(false);
   protected readonly tries = signal(0);
@@ -111,10 +113,7 @@ export class RuleEditor implements HoldsWork {
   protected readonly labels = ruleLabels();
   protected readonly newHeading = $localize`:@@programmes.new-rule:New rule`;
   /** What somebody else saved meanwhile, beside what stands here. */
-  protected readonly conflict = signal<{
-    readonly theirs: Rule;
-    readonly mine: RuleDefinition;
-  } | null>(null);
+  protected readonly conflict = signal<Conflict | null>(null);
 
   /** Made once, so that sending twice adds once. */
   private readonly ownId = newId();
@@ -146,24 +145,13 @@ export class RuleEditor implements HoldsWork {
     }
     const rule = definitionOf(form);
     const base = this.filledFrom();
-    const saving = base
-      ? this.api.editRule(base.id, base.version, rule)
-      : this.api.addRule(this.id(), this.ownId, rule);
-    this.run(saving, (saved) => {
-      form.markAsPristine();
-      if (base) {
-        this.notices.tell({
-          text: $localize`:@@programmes.saved-revision:Saved as revision ${saved.revision}:revision:.`,
-        });
-        return;
-      }
-      this.notices.tell({ text: $localize`:@@programmes.rule-added:Rule added.` });
-      void this.router.navigate(['/programmes', this.id()]);
-    });
+    if (base) this.judge(base, rule);
+    else this.add(rule);
   }
 
   protected retire(rule: Rule): void {
-    this.run(this.api.retireRule(rule.id, this.version(rule)), (retired) => {
+    this.run(this.api.retireRule(rule.id, rule.version), (retired) => {
+      this.keep(retired);
       this.notices.offerUndo(
         $localize`:@@programmes.rule-retired:Rule retired; its schedules have ended.`,
         () => this.restore(retired),
@@ -172,7 +160,7 @@ export class RuleEditor implements HoldsWork {
   }
 
   protected restore(rule: Rule): void {
-    this.run(this.api.restoreRule(rule.id, this.version(rule)), () => undefined);
+    this.run(this.api.restoreRule(rule.id, rule.version), (restored) => this.keep(restored));
   }
 
   protected takeTheirs(theirs: Rule): void {
@@ -188,8 +176,38 @@ export class RuleEditor implements HoldsWork {
     this.save();
   }
 
-  private version(rule: Rule): number {
-    return this.filledFrom()?.version ?? rule.version;
+  private add(rule: RuleDefinition): void {
+    this.run(this.api.addRule(this.id(), this.ownId, rule), () => {
+      this.form().markAsPristine();
+      this.notices.tell({ text: $localize`:@@programmes.rule-added:Rule added.` });
+      void this.router.navigate(['/programmes', this.id()]);
+    });
+  }
+
+  /** Shows what an edit would do to the tasks, and makes it when that is what was meant. */
+  private judge(base: Base, to: RuleDefinition): void {
+    const from = this.known();
+    if (!from) return;
+    this.run(this.api.previewEdit(base.id, base.version, to), (effect) => {
+      const revision = from.revision + 1;
+      const data: EditToJudge = { from, to, effect, revision, procedures: this.titles() };
+      this.dialog
+        .open<EditPreview, EditToJudge, true>(EditPreview, { data, width: '38rem' })
+        .afterClosed()
+        .subscribe((meant) => {
+          if (meant) this.edit(base, to);
+        });
+    });
+  }
+
+  private edit(base: Base, rule: RuleDefinition): void {
+    this.run(this.api.editRule(base.id, base.version, rule), (saved) => {
+      this.form().markAsPristine();
+      this.keep(saved);
+      this.notices.tell({
+        text: $localize`:@@programmes.saved-revision:Saved as revision ${saved.revision}:revision:.`,
+      });
+    });
   }
 
   private fill(rule: Rule): void {
@@ -197,14 +215,18 @@ export class RuleEditor implements HoldsWork {
     this.form.set(ruleForm(rule));
   }
 
-  private run(call: Observable<Rule>, then: (rule: Rule) => void): void {
+  /** What the server now has of this rule. */
+  private keep(rule: Rule): void {
+    this.filledFrom.set(rule);
+    this.rule.set(rule);
+  }
+
+  private run<T>(call: Observable<T>, then: (reply: T) => void): void {
     this.busy.set(true);
     call.subscribe({
-      next: (rule) => {
+      next: (reply) => {
         this.busy.set(false);
-        this.filledFrom.set(rule);
-        if (this.ruleId()) this.rule.set(rule);
-        then(rule);
+        then(reply);
       },
       error: (failure: unknown) => {
         this.busy.set(false);
