@@ -1,8 +1,8 @@
-import { S3Client } from '@aws-sdk/client-s3';
 import { Pool } from 'pg';
 import { pino } from 'pino';
 import { connect } from '@db/connect';
 import { readConfig } from './config';
+import { openFiles } from './core-services';
 import { createApp } from './create-app';
 
 const config = readConfig(process.env);
@@ -10,16 +10,7 @@ const log = pino({ level: config.LOG_LEVEL });
 const sequelize = connect(config.DATABASE_URL);
 const sessionPool = new Pool({ connectionString: config.DATABASE_URL, max: 4 });
 sessionPool.on('error', (error) => log.warn({ err: error }, 'session connection lost'));
-const files = new S3Client({
-  region: config.S3_REGION,
-  endpoint: config.S3_ENDPOINT,
-  forcePathStyle: config.S3_ENDPOINT !== undefined,
-  requestChecksumCalculation: 'WHEN_REQUIRED',
-  credentials: {
-    accessKeyId: config.S3_ACCESS_KEY_ID,
-    secretAccessKey: config.S3_SECRET_ACCESS_KEY,
-  },
-});
+const files = openFiles(config);
 
 const app = createApp({ config, log, sequelize, sessionPool, files, now: () => new Date() });
 const server = app.listen(config.PORT, (error) => {
