@@ -21,7 +21,8 @@ describe('the words of a day', () => {
   ])('says %d minutes', (minutes, text) => expect(minutesText(minutes)).toBe(text));
 
   it('counts days in the zone of the store', () => {
-    expect(when({}, '2026-06-10')).toBe('due by Fri, Jun 12');
+    expect(when({}, '2026-06-10')).toBe('due by Friday');
+    expect(when({}, '2026-06-01')).toBe('due by Jun 12');
     expect(when({}, '2026-06-12')).toBe('due today');
     expect(when({ state: 'overdue' }, '2026-06-13')).toBe('1 day over');
     expect(when({ state: 'overdue' }, '2026-06-21')).toBe('9 days over');

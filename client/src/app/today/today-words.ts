@@ -22,9 +22,12 @@ export function whenText(task: TodayTask, today: string, zone: string, locale: s
       : $localize`:@@today.days-over:${late}:count: days over`;
   }
   if (task.state !== 'open' && task.state !== 'due-soon') return '';
-  return closesOn === today
-    ? $localize`:@@today.due-today:due today`
-    : $localize`:@@today.due-by:due by ${calendarDay(closesOn, locale)}:day:`;
+  const left = daysBetween(parseCalendarDate(today), parseCalendarDate(closesOn));
+  if (left === 0) return $localize`:@@today.due-today:due today`;
+  // Within the week its name is the shorter and the clearer word.
+  const style =
+    left < 7 ? ({ weekday: 'long' } as const) : ({ month: 'short', day: 'numeric' } as const);
+  return $localize`:@@today.due-by:due by ${calendarDay(closesOn, locale, style)}:day:`;
 }
 
 /** Share of the window that is left at `now` (epoch milliseconds): the oil in the task's vat. */
