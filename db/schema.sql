@@ -957,6 +957,10 @@ CREATE INDEX tasks_closes_at_idx ON ONLY public.tasks USING btree (closes_at) WH
 
 CREATE INDEX tasks_beyond_closes_at_idx ON public.tasks_beyond USING btree (closes_at) WHERE (outcome = 'none'::text);
 
+CREATE INDEX tasks_lapses_at_opens_at_idx ON ONLY public.tasks USING btree (lapses_at, opens_at) WHERE (outcome = 'none'::text);
+
+CREATE INDEX tasks_beyond_lapses_at_opens_at_idx ON public.tasks_beyond USING btree (lapses_at, opens_at) WHERE (outcome = 'none'::text);
+
 CREATE INDEX tasks_organisation_id_due_on_due_at_id_idx ON ONLY public.tasks USING btree (organisation_id, due_on, due_at, id);
 
 CREATE INDEX tasks_beyond_organisation_id_due_on_due_at_id_idx ON public.tasks_beyond USING btree (organisation_id, due_on, due_at, id);
@@ -984,6 +988,8 @@ CREATE INDEX visits_store_id_idx ON public.visits USING btree (store_id);
 ALTER INDEX public.tasks_assigned_to_due_on_idx ATTACH PARTITION public.tasks_beyond_assigned_to_due_on_idx;
 
 ALTER INDEX public.tasks_closes_at_idx ATTACH PARTITION public.tasks_beyond_closes_at_idx;
+
+ALTER INDEX public.tasks_lapses_at_opens_at_idx ATTACH PARTITION public.tasks_beyond_lapses_at_opens_at_idx;
 
 ALTER INDEX public.tasks_organisation_id_due_on_due_at_id_idx ATTACH PARTITION public.tasks_beyond_organisation_id_due_on_due_at_id_idx;
 

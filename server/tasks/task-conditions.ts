@@ -39,7 +39,14 @@ export function taskConditions(
   if (filters.unassigned === 'no') all.push('t.assigned_to IS NOT NULL');
   all.push(...dayConditions(filters, binds), ...wordConditions(filters.q ?? '', binds));
   const at = () => `${binds.add(now)}::timestamptz`;
-  if (filters.state) all.push(anyOf(filters.state.map((state) => inState[state](at()))));
+  if (filters.state) {
+    // Said once for all of them, it rules whole months out.
+    if (filters.state.every(toCome)) all.push(`t.outcome = 'none' AND t.lapses_at > ${at()}`);
+    if (!filters.state.includes('planned') && filters.state.every(toCome)) {
+      all.push(`t.opens_at <= ${at()}`);
+    }
+    all.push(anyOf(filters.state.map((state) => inState[state](at()))));
+  }
   if (filters.end) {
     all.push(`t.closes_at <= ${at()}`, anyOf(filters.end.map((end) => ended[end])));
   }
@@ -60,6 +67,9 @@ export function storeConditions(
 }
 
 const anyOf = (parts: readonly string[]) => `(${parts.length > 0 ? parts.join(' OR ') : 'false'})`;
+
+/** Whether a task in this state can still be done. */
+const toCome = (state: TaskState) => ['planned', 'open', 'due-soon', 'overdue'].includes(state);
 
 /** The same rule as shared/tasks/task-state.ts, as ranges that an index can serve. */
 const inState: Readonly<Record<TaskState, (now: string) => string>> = {

@@ -28,7 +28,7 @@ export async function benchServer(databaseUrl: string): Promise<BenchServer> {
     },
   });
   const url = `http://127.0.0.1:${port}`;
-  await untilReady(`${url}/health/ready`, server);
+  await untilReady(`${url}/health/live`, server);
   return {
     url: `${url}/api/v1`,
     signIn: (email, password) => signIn(`${url}/api/v1/session`, email, password),
