@@ -1,5 +1,6 @@
 import * as z from 'zod';
 import { endpoint } from '../contract/endpoint';
+import { fileFormat, fileReply } from '../exports/export-format';
 import { componentKinds } from '../procedures/step-kind';
 import { causes, severities } from './cause';
 
@@ -68,6 +69,15 @@ export const listFindings = endpoint({
   }),
 });
 
+export const exportFindings = endpoint({
+  method: 'GET',
+  path: '/findings/export',
+  summary: 'The findings of a list as a file',
+  access: 'findings.read',
+  query: z.strictObject({ ...findingFilters, ...fileFormat }),
+  reply: fileReply,
+});
+
 export const readFinding = endpoint({
   method: 'GET',
   path: '/findings/:id',
@@ -132,6 +142,7 @@ export const reopenFinding = endpoint({
 
 export const findingEndpoints = [
   listFindings,
+  exportFindings,
   readFinding,
   reportFinding,
   settleFinding,

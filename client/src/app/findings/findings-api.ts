@@ -1,6 +1,7 @@
 import { inject, Injectable } from '@angular/core';
 import type { ReplyOf } from '@shared/contract/endpoint';
 import type {
+  exportFindings,
   listFindings,
   readFinding,
   reopenFinding,
@@ -26,6 +27,13 @@ export class FindingsApi {
 
   list(query: () => FindingQuery) {
     return this.api.resource<typeof listFindings>('/findings', () => ({ query: query() }));
+  }
+
+  file(query: FindingQuery, format: 'csv' | 'xlsx'): string {
+    const { page: _page, pageSize: _pageSize, ...filters } = query;
+    return this.api.address<typeof exportFindings>('/findings/export', {
+      query: { ...filters, format },
+    });
   }
 
   one(id: () => string) {

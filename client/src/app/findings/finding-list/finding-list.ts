@@ -6,6 +6,7 @@ import { Session } from '../../session/session';
 import { Cell } from '../../ui/data-table/cell';
 import type { PageChange } from '../../ui/data-table/data-table';
 import { DataTable } from '../../ui/data-table/data-table';
+import { ExportMenu } from '../../ui/data-table/export-menu';
 import type { TableColumn } from '../../ui/data-table/table-column';
 import { Figure } from '../../ui/figure/figure';
 import { FilterBar } from '../../ui/filter-bar/filter-bar';
@@ -29,6 +30,7 @@ const text = (value: string | undefined): string => value ?? '';
   imports: [
     Cell,
     DataTable,
+    ExportMenu,
     Figure,
     FilterBar,
     FilterDates,
@@ -75,7 +77,7 @@ export class FindingList {
     store: this.store() || undefined,
     unit: this.unit() || undefined,
   }));
-  protected readonly list = this.api.list(() => ({
+  private readonly query = computed((): FindingQuery => ({
     ...this.place(),
     q: this.q() || undefined,
     cause: (this.cause() || undefined) as FindingQuery['cause'],
@@ -87,6 +89,9 @@ export class FindingList {
     page: this.page(),
     pageSize: this.pageSize(),
   }));
+  protected readonly list = this.api.list(this.query);
+  protected readonly csv = computed(() => this.api.file(this.query(), 'csv'));
+  protected readonly xlsx = computed(() => this.api.file(this.query(), 'xlsx'));
   private readonly open = this.api.list(() => ({
     ...this.place(),
     settled: 'no',
