@@ -7,6 +7,7 @@ import {
   linkedSignal,
   LOCALE_ID,
   signal,
+  untracked,
   viewChildren,
 } from '@angular/core';
 import { MatButton } from '@angular/material/button';
@@ -33,6 +34,7 @@ import { PhotoOutbox } from '../../uploads/photo-outbox';
 import { CheckCard } from '../check-card/check-card';
 import { ComingVisits } from '../coming-visits/coming-visits';
 import { DoneToday } from '../done-today/done-today';
+import type { Shift } from '../shift-api';
 import { ShiftApi } from '../shift-api';
 
 /** The shift desk of a store: cautions, a few large checks, one act; then who comes when. */
@@ -74,9 +76,15 @@ export class ShiftPage {
   readonly store = input<string>();
 
   protected readonly resource = this.api.shift(() => this.store());
-  protected readonly shift = computed(() =>
-    this.resource.hasValue() ? this.resource.value() : null,
-  );
+  /** Kept while it is read anew, so that nothing jumps under a finger. */
+  protected readonly shift = linkedSignal<Shift | null, Shift | null>({
+    source: () => (this.resource.hasValue() ? this.resource.value() : null),
+    computation: (read, before) => {
+      const kept = before?.value ?? null;
+      const same = untracked(this.store) === undefined || kept?.storeId === untracked(this.store);
+      return read ?? (same ? kept : null);
+    },
+  });
   protected readonly name = computed(() => {
     const shift = this.shift();
     const store = shift?.stores.find(({ id }) => id === shift.storeId);
@@ -94,13 +102,17 @@ export class ShiftPage {
     const texts = this.shift()?.waiting.flatMap(({ procedure }) => procedure.cautions) ?? [];
     return [...new Set(texts.map((text) => this.words.text(text)))];
   });
+  private readonly read = signal<readonly string[]>([]);
   /** Asked anew when another caution comes up. */
-  protected readonly cautionsSeen = linkedSignal({
-    source: () => this.cautions().join('\n'),
-    computation: (text) => text === '',
-  });
+  protected readonly cautionsSeen = computed(() =>
+    this.cautions().every((caution) => this.read().includes(caution)),
+  );
   protected readonly busy = signal(false);
   protected readonly complete = computed(() => this.cards().filter((card) => card.complete()));
+
+  protected seeCautions(): void {
+    this.read.update((read) => [...read, ...this.cautions()]);
+  }
 
   protected choose(store: string): void {
     void this.router.navigate([], { queryParams: { store } });

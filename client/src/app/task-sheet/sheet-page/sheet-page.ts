@@ -5,6 +5,7 @@ import {
   effect,
   inject,
   input,
+  linkedSignal,
   LOCALE_ID,
   untracked,
 } from '@angular/core';
@@ -27,6 +28,7 @@ import { TaskHistory } from '../history/task-history';
 import { SheetDraft } from '../sheet-draft';
 import { SheetForm } from '../sheet-form/sheet-form';
 import { keptReason } from '../sheet-words';
+import type { TaskSheet } from '../task-sheet-api';
 import { TaskSheetApi } from '../task-sheet-api';
 
 /** One task from its cautions to its closing, and what became of it. */
@@ -61,9 +63,14 @@ export class SheetPage {
 
   protected readonly resource = this.api.sheet(() => this.id());
   protected readonly history = this.api.history(() => this.id());
-  protected readonly sheet = computed(() =>
-    this.resource.hasValue() ? this.resource.value() : null,
-  );
+  /** Kept while it is read anew, so that nothing jumps under a finger. */
+  protected readonly sheet = linkedSignal<TaskSheet | null, TaskSheet | null>({
+    source: () => (this.resource.hasValue() ? this.resource.value() : null),
+    computation: (read, before) => {
+      const kept = before?.value ?? null;
+      return read ?? (kept?.task.id === untracked(this.id) ? kept : null);
+    },
+  });
   protected readonly title = computed(() => {
     const sheet = this.sheet();
     return sheet ? this.words.text(sheet.procedure.title) : '';
