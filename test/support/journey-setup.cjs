@@ -48,6 +48,7 @@ module.exports = async () => {
     }),
   );
   process.env.JOURNEY_URL = `http://localhost:${web}`;
+  process.env.JOURNEY_DATABASE = env.DATABASE_OWNER_URL;
   process.env.JOURNEY_INBOX = `http://127.0.0.1:${inbox}`;
   await untilReady(`${process.env.JOURNEY_URL}/health/ready`);
 };
