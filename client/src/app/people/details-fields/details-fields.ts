@@ -35,6 +35,7 @@ import { detailsLabels } from './details-form';
       display: grid;
       grid-template-columns: repeat(auto-fit, minmax(16rem, 1fr));
       gap: var(--vw-space-4) var(--vw-space-3);
+      align-items: start;
     }
   `,
   changeDetection: ChangeDetectionStrategy.OnPush,

@@ -11,9 +11,11 @@ import {
 import { MatButton } from '@angular/material/button';
 import { MatDialog } from '@angular/material/dialog';
 import { Router, RouterLink } from '@angular/router';
+import type { Role } from '@shared/access/role';
 import { isCalendarDate } from '@shared/calendar/calendar-date';
 import { groupOptions } from '../../fleet/group-options';
 import { ProblemView } from '../../problems/problem-view';
+import { Session } from '../../session/session';
 import { FilterSelect } from '../../ui/filter-bar/filter-select';
 import { PageHeader } from '../../ui/page-header/page-header';
 import { PageEmpty } from '../../ui/page-states/page-empty';
@@ -28,6 +30,7 @@ import { VisitDialog } from '../visit-dialog/visit-dialog';
 import type { Visit } from '../visits-api';
 
 const text = (value: string | undefined): string => value ?? '';
+const plans = (role: Role): boolean => role === 'regional-facility-manager';
 
 /** Bundles what waits into visits, gives them to technicians and days, orders and publishes them. */
 @Component({
@@ -54,12 +57,19 @@ export class PlanPage {
   protected readonly desk = inject(PlanDesk);
   private readonly router = inject(Router);
   private readonly dialog = inject(MatDialog);
+  private readonly session = inject(Session);
 
   /** The day in hand, from the address; today without one. */
   readonly on = input('', { transform: text });
   readonly region = input('', { transform: text });
 
-  protected readonly regions = groupOptions('regions');
+  private readonly allRegions = groupOptions('regions');
+  /** The regions that this person plans; all of them where the scope is wider than regions. */
+  protected readonly regions = computed(() => {
+    const scopes = this.session.roles().filter(({ role }) => plans(role));
+    if (scopes.some(({ scopeKind }) => scopeKind !== 'region')) return this.allRegions();
+    return scopes.map(({ scopeId, scopeName }) => ({ value: scopeId, label: scopeName }));
+  });
   protected readonly past = computed(() => this.desk.day() < this.desk.today());
   /** Which half a phone shows. */
   protected readonly half = signal<'routes' | 'waiting'>('routes');
