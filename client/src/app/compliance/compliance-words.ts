@@ -54,8 +54,8 @@ export class ComplianceWords {
   /** The setting that a rule's rate hangs on. */
   window({ kind, before, after }: Window): string {
     return kind === 'days'
-      ? $localize`:@@compliance.window.days:${before}:before: days before to ${after}:after: after`
-      : $localize`:@@compliance.window.hours:${before}:before: hours before to ${after}:after: after`;
+      ? $localize`:@@compliance.window.days:days: ${before}:before: before, ${after}:after: after`
+      : $localize`:@@compliance.window.hours:hours: ${before}:before: before, ${after}:after: after`;
   }
 
   grouping(by: Grouping): string {

