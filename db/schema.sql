@@ -115,6 +115,39 @@ CREATE FUNCTION public.find_sign_in(wanted text) RETURNS TABLE(person_id uuid, o
         WHERE email = lower(wanted) AND disabled_at IS NULL
       $$;
 
+CREATE FUNCTION public.follow_compliance_days() RETURNS trigger
+    LANGUAGE plpgsql
+    AS $$
+      DECLARE sign integer := CASE TG_OP WHEN 'DELETE' THEN -1 ELSE 1 END;
+      BEGIN
+        INSERT INTO compliance_weeks AS w
+          SELECT organisation_id, store_id, rule_id, date_trunc('week', day)::date, sign * sum(on_time),
+            sign * sum(late), sign * sum(not_done), sign * sum(excused), sign * sum(covered)
+          FROM changed GROUP BY 1, 2, 3, 4
+          ON CONFLICT (store_id, week, rule_id) DO UPDATE SET on_time = w.on_time + excluded.on_time,
+            late = w.late + excluded.late, not_done = w.not_done + excluded.not_done,
+            excused = w.excused + excluded.excused, covered = w.covered + excluded.covered;
+        INSERT INTO compliance_months AS m
+          SELECT organisation_id, store_id, rule_id, date_trunc('month', day)::date, sign * sum(on_time),
+            sign * sum(late), sign * sum(not_done), sign * sum(excused), sign * sum(covered)
+          FROM changed GROUP BY 1, 2, 3, 4
+          ON CONFLICT (store_id, month, rule_id) DO UPDATE SET on_time = m.on_time + excluded.on_time,
+            late = m.late + excluded.late, not_done = m.not_done + excluded.not_done,
+            excused = m.excused + excluded.excused, covered = m.covered + excluded.covered;
+        IF TG_OP = 'DELETE' THEN
+          DELETE FROM compliance_weeks w USING changed c
+            WHERE w.store_id = c.store_id AND w.rule_id = c.rule_id
+              AND w.week = date_trunc('week', c.day)::date
+              AND w.on_time + w.late + w.not_done + w.excused + w.covered = 0;
+          DELETE FROM compliance_months m USING changed c
+            WHERE m.store_id = c.store_id AND m.rule_id = c.rule_id
+              AND m.month = date_trunc('month', c.day)::date
+              AND m.on_time + m.late + m.not_done + m.excused + m.covered = 0;
+        END IF;
+        RETURN NULL;
+      END
+    $$;
+
 CREATE FUNCTION public.hold_stale_day() RETURNS trigger
     LANGUAGE plpgsql
     AS $$
@@ -183,6 +216,30 @@ CREATE TABLE public.compliance_days (
     store_id uuid NOT NULL,
     rule_id uuid NOT NULL,
     day date NOT NULL,
+    on_time integer NOT NULL,
+    late integer NOT NULL,
+    not_done integer NOT NULL,
+    excused integer NOT NULL,
+    covered integer NOT NULL
+);
+
+CREATE TABLE public.compliance_months (
+    organisation_id uuid NOT NULL,
+    store_id uuid NOT NULL,
+    rule_id uuid NOT NULL,
+    month date NOT NULL,
+    on_time integer NOT NULL,
+    late integer NOT NULL,
+    not_done integer NOT NULL,
+    excused integer NOT NULL,
+    covered integer NOT NULL
+);
+
+CREATE TABLE public.compliance_weeks (
+    organisation_id uuid NOT NULL,
+    store_id uuid NOT NULL,
+    rule_id uuid NOT NULL,
+    week date NOT NULL,
     on_time integer NOT NULL,
     late integer NOT NULL,
     not_done integer NOT NULL,
@@ -726,6 +783,12 @@ ALTER TABLE ONLY public.chains
 ALTER TABLE ONLY public.compliance_days
     ADD CONSTRAINT compliance_days_pkey PRIMARY KEY (store_id, day, rule_id);
 
+ALTER TABLE ONLY public.compliance_months
+    ADD CONSTRAINT compliance_months_pkey PRIMARY KEY (store_id, month, rule_id);
+
+ALTER TABLE ONLY public.compliance_weeks
+    ADD CONSTRAINT compliance_weeks_pkey PRIMARY KEY (store_id, week, rule_id);
+
 ALTER TABLE ONLY public.components
     ADD CONSTRAINT components_pkey PRIMARY KEY (id);
 
@@ -903,6 +966,10 @@ CREATE INDEX audit_events_subject_kind_subject_id_id_idx ON public.audit_events 
 
 CREATE INDEX compliance_days_organisation_id_day_idx ON public.compliance_days USING btree (organisation_id, day);
 
+CREATE INDEX compliance_months_organisation_id_month_idx ON public.compliance_months USING btree (organisation_id, month);
+
+CREATE INDEX compliance_weeks_organisation_id_week_idx ON public.compliance_weeks USING btree (organisation_id, week);
+
 CREATE INDEX components_unit_id_kind_installed_on_idx ON public.components USING btree (unit_id, kind, installed_on);
 
 CREATE INDEX findings_store_id_found_at_idx ON public.findings USING btree (store_id, found_at);
@@ -1004,6 +1071,10 @@ ALTER INDEX public.tasks_store_id_due_on_idx ATTACH PARTITION public.tasks_beyon
 ALTER INDEX public.tasks_unit_id_due_on_idx ATTACH PARTITION public.tasks_beyond_unit_id_due_on_idx;
 
 ALTER INDEX public.tasks_visit_id_idx ATTACH PARTITION public.tasks_beyond_visit_id_idx;
+
+CREATE TRIGGER days_put_in AFTER INSERT ON public.compliance_days REFERENCING NEW TABLE AS changed FOR EACH STATEMENT EXECUTE FUNCTION public.follow_compliance_days();
+
+CREATE TRIGGER days_taken_out AFTER DELETE ON public.compliance_days REFERENCING OLD TABLE AS changed FOR EACH STATEMENT EXECUTE FUNCTION public.follow_compliance_days();
 
 CREATE TRIGGER hold_stale_day BEFORE INSERT ON public.stale_days FOR EACH ROW EXECUTE FUNCTION public.hold_stale_day();
 
@@ -1276,6 +1347,10 @@ ALTER TABLE public.chains ENABLE ROW LEVEL SECURITY;
 
 ALTER TABLE public.compliance_days ENABLE ROW LEVEL SECURITY;
 
+ALTER TABLE public.compliance_months ENABLE ROW LEVEL SECURITY;
+
+ALTER TABLE public.compliance_weeks ENABLE ROW LEVEL SECURITY;
+
 ALTER TABLE public.components ENABLE ROW LEVEL SECURITY;
 
 ALTER TABLE public.digests ENABLE ROW LEVEL SECURITY;
@@ -1300,77 +1375,81 @@ ALTER TABLE public.one_time_links ENABLE ROW LEVEL SECURITY;
 
 ALTER TABLE public.organisations ENABLE ROW LEVEL SECURITY;
 
-CREATE POLICY own_organisation ON public.audit_events USING ((organisation_id = (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid));
+CREATE POLICY own_organisation ON public.audit_events USING ((organisation_id = ( SELECT (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid AS "nullif")));
 
-CREATE POLICY own_organisation ON public.chains USING ((organisation_id = (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid));
+CREATE POLICY own_organisation ON public.chains USING ((organisation_id = ( SELECT (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid AS "nullif")));
 
-CREATE POLICY own_organisation ON public.compliance_days USING ((organisation_id = (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid));
+CREATE POLICY own_organisation ON public.compliance_days USING ((organisation_id = ( SELECT (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid AS "nullif")));
 
-CREATE POLICY own_organisation ON public.components USING ((organisation_id = (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid));
+CREATE POLICY own_organisation ON public.compliance_months USING ((organisation_id = ( SELECT (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid AS "nullif")));
 
-CREATE POLICY own_organisation ON public.digests USING ((organisation_id = (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid));
+CREATE POLICY own_organisation ON public.compliance_weeks USING ((organisation_id = ( SELECT (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid AS "nullif")));
 
-CREATE POLICY own_organisation ON public.enrolments USING ((organisation_id = (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid));
+CREATE POLICY own_organisation ON public.components USING ((organisation_id = ( SELECT (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid AS "nullif")));
 
-CREATE POLICY own_organisation ON public.findings USING ((organisation_id = (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid));
+CREATE POLICY own_organisation ON public.digests USING ((organisation_id = ( SELECT (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid AS "nullif")));
 
-CREATE POLICY own_organisation ON public.idempotency_keys USING ((organisation_id = (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid));
+CREATE POLICY own_organisation ON public.enrolments USING ((organisation_id = ( SELECT (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid AS "nullif")));
 
-CREATE POLICY own_organisation ON public.import_problems USING ((organisation_id = (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid));
+CREATE POLICY own_organisation ON public.findings USING ((organisation_id = ( SELECT (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid AS "nullif")));
 
-CREATE POLICY own_organisation ON public.imports USING ((organisation_id = (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid));
+CREATE POLICY own_organisation ON public.idempotency_keys USING ((organisation_id = ( SELECT (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid AS "nullif")));
 
-CREATE POLICY own_organisation ON public.inspections USING ((organisation_id = (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid));
+CREATE POLICY own_organisation ON public.import_problems USING ((organisation_id = ( SELECT (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid AS "nullif")));
 
-CREATE POLICY own_organisation ON public.letters USING ((organisation_id = (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid));
+CREATE POLICY own_organisation ON public.imports USING ((organisation_id = ( SELECT (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid AS "nullif")));
 
-CREATE POLICY own_organisation ON public.long_jobs USING ((organisation_id = (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid));
+CREATE POLICY own_organisation ON public.inspections USING ((organisation_id = ( SELECT (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid AS "nullif")));
 
-CREATE POLICY own_organisation ON public.one_time_links USING ((organisation_id = (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid));
+CREATE POLICY own_organisation ON public.letters USING ((organisation_id = ( SELECT (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid AS "nullif")));
 
-CREATE POLICY own_organisation ON public.organisations USING ((id = (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid));
+CREATE POLICY own_organisation ON public.long_jobs USING ((organisation_id = ( SELECT (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid AS "nullif")));
 
-CREATE POLICY own_organisation ON public.people USING ((organisation_id = (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid));
+CREATE POLICY own_organisation ON public.one_time_links USING ((organisation_id = ( SELECT (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid AS "nullif")));
 
-CREATE POLICY own_organisation ON public.procedure_versions USING ((organisation_id = (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid));
+CREATE POLICY own_organisation ON public.organisations USING ((id = ( SELECT (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid AS "nullif")));
 
-CREATE POLICY own_organisation ON public.procedures USING ((organisation_id = (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid));
+CREATE POLICY own_organisation ON public.people USING ((organisation_id = ( SELECT (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid AS "nullif")));
 
-CREATE POLICY own_organisation ON public.programmes USING ((organisation_id = (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid));
+CREATE POLICY own_organisation ON public.procedure_versions USING ((organisation_id = ( SELECT (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid AS "nullif")));
 
-CREATE POLICY own_organisation ON public.readings USING ((organisation_id = (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid));
+CREATE POLICY own_organisation ON public.procedures USING ((organisation_id = ( SELECT (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid AS "nullif")));
 
-CREATE POLICY own_organisation ON public.regions USING ((organisation_id = (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid));
+CREATE POLICY own_organisation ON public.programmes USING ((organisation_id = ( SELECT (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid AS "nullif")));
 
-CREATE POLICY own_organisation ON public.repairs USING ((organisation_id = (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid));
+CREATE POLICY own_organisation ON public.readings USING ((organisation_id = ( SELECT (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid AS "nullif")));
 
-CREATE POLICY own_organisation ON public.role_grants USING ((organisation_id = (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid));
+CREATE POLICY own_organisation ON public.regions USING ((organisation_id = ( SELECT (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid AS "nullif")));
 
-CREATE POLICY own_organisation ON public.routes USING ((organisation_id = (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid));
+CREATE POLICY own_organisation ON public.repairs USING ((organisation_id = ( SELECT (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid AS "nullif")));
 
-CREATE POLICY own_organisation ON public.rule_revisions USING ((organisation_id = (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid));
+CREATE POLICY own_organisation ON public.role_grants USING ((organisation_id = ( SELECT (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid AS "nullif")));
 
-CREATE POLICY own_organisation ON public.rules USING ((organisation_id = (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid));
+CREATE POLICY own_organisation ON public.routes USING ((organisation_id = ( SELECT (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid AS "nullif")));
 
-CREATE POLICY own_organisation ON public.saved_views USING ((organisation_id = (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid));
+CREATE POLICY own_organisation ON public.rule_revisions USING ((organisation_id = ( SELECT (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid AS "nullif")));
 
-CREATE POLICY own_organisation ON public.schedules USING ((organisation_id = (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid));
+CREATE POLICY own_organisation ON public.rules USING ((organisation_id = ( SELECT (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid AS "nullif")));
 
-CREATE POLICY own_organisation ON public.stale_days USING ((organisation_id = (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid));
+CREATE POLICY own_organisation ON public.saved_views USING ((organisation_id = ( SELECT (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid AS "nullif")));
 
-CREATE POLICY own_organisation ON public.stores USING ((organisation_id = (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid));
+CREATE POLICY own_organisation ON public.schedules USING ((organisation_id = ( SELECT (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid AS "nullif")));
 
-CREATE POLICY own_organisation ON public.task_changes USING ((organisation_id = (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid));
+CREATE POLICY own_organisation ON public.stale_days USING ((organisation_id = ( SELECT (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid AS "nullif")));
 
-CREATE POLICY own_organisation ON public.task_notices USING ((organisation_id = (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid));
+CREATE POLICY own_organisation ON public.stores USING ((organisation_id = ( SELECT (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid AS "nullif")));
 
-CREATE POLICY own_organisation ON public.tasks USING ((organisation_id = (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid));
+CREATE POLICY own_organisation ON public.task_changes USING ((organisation_id = ( SELECT (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid AS "nullif")));
 
-CREATE POLICY own_organisation ON public.units USING ((organisation_id = (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid));
+CREATE POLICY own_organisation ON public.task_notices USING ((organisation_id = ( SELECT (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid AS "nullif")));
 
-CREATE POLICY own_organisation ON public.uploads USING ((organisation_id = (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid));
+CREATE POLICY own_organisation ON public.tasks USING ((organisation_id = ( SELECT (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid AS "nullif")));
 
-CREATE POLICY own_organisation ON public.visits USING ((organisation_id = (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid));
+CREATE POLICY own_organisation ON public.units USING ((organisation_id = ( SELECT (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid AS "nullif")));
+
+CREATE POLICY own_organisation ON public.uploads USING ((organisation_id = ( SELECT (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid AS "nullif")));
+
+CREATE POLICY own_organisation ON public.visits USING ((organisation_id = ( SELECT (NULLIF(current_setting('app.organisation_id'::text, true), ''::text))::uuid AS "nullif")));
 
 ALTER TABLE public.people ENABLE ROW LEVEL SECURITY;
 
@@ -1440,7 +1519,11 @@ GRANT SELECT,INSERT ON TABLE public.audit_events TO vatwright_app;
 
 GRANT SELECT,INSERT,DELETE,UPDATE ON TABLE public.chains TO vatwright_app;
 
-GRANT SELECT,INSERT,DELETE,UPDATE ON TABLE public.compliance_days TO vatwright_app;
+GRANT SELECT,INSERT,DELETE ON TABLE public.compliance_days TO vatwright_app;
+
+GRANT SELECT,INSERT,DELETE,UPDATE ON TABLE public.compliance_months TO vatwright_app;
+
+GRANT SELECT,INSERT,DELETE,UPDATE ON TABLE public.compliance_weeks TO vatwright_app;
 
 GRANT SELECT,INSERT,DELETE,UPDATE ON TABLE public.components TO vatwright_app;
 

@@ -13,7 +13,7 @@ export const createOrganisations = sqlMigration(
     );
     ALTER TABLE organisations ENABLE ROW LEVEL SECURITY;
     CREATE POLICY own_organisation ON organisations
-      USING (id = nullif(current_setting('app.organisation_id', true), '')::uuid);
+      USING (id = (SELECT nullif(current_setting('app.organisation_id', true), '')::uuid));
     GRANT SELECT, UPDATE ON organisations TO vatwright_app;
   `,
   `DROP TABLE organisations;`,

@@ -7,8 +7,11 @@ export interface WriteAheadServices {
   readonly log: Pick<Logger, 'error' | 'info'>;
 }
 
-/** Longer than the longest horizon a rule may have (400 days). */
-const MONTHS_AHEAD = '14 months';
+/**
+ * As most rules look ahead. Months that a rule with a longer horizon needs are made when it is written
+ * for; each one too many would have to be planned for by every statement over tasks.
+ */
+const MONTHS_AHEAD = '4 months';
 
 /**
  * Has the months to come ready and writes the tasks of every organisation up to its rules' horizons.

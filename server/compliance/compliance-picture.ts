@@ -29,7 +29,7 @@ export async function compliancePicture(
   const binds = new Binds();
   const days = daysOf(query.from, query.to);
   const where = `${complianceFilter(actor, query, binds)}
-    AND d.day BETWEEN ${binds.add(days.from)} AND ${binds.add(days.to)}`;
+    AND d.month BETWEEN ${binds.add(days.from)} AND ${binds.add(days.to)}`;
   const stores = await tenant.row<{ total: number }>(
     `SELECT count(DISTINCT d.store_id)::int AS total ${complianceFrom} WHERE ${where}`,
     binds.values,
@@ -39,10 +39,10 @@ export async function compliancePicture(
        SELECT s.id ${complianceFrom} WHERE ${where} GROUP BY s.id, s.number, s.name
        ORDER BY s.number, s.name, s.id
        LIMIT ${binds.add(pageSize)} OFFSET ${binds.add((page - 1) * pageSize)})
-     SELECT s.id AS "storeId", s.number, s.name, to_char(d.day, 'YYYY-MM') AS month,
+     SELECT s.id AS "storeId", s.number, s.name, to_char(d.month, 'YYYY-MM') AS month,
        ${sums('true')} AS counts
      ${complianceFrom} JOIN shown ON shown.id = s.id WHERE ${where}
-     GROUP BY s.id, s.number, s.name, to_char(d.day, 'YYYY-MM')
+     GROUP BY s.id, s.number, s.name, to_char(d.month, 'YYYY-MM')
      ORDER BY s.number, s.name, s.id`,
     binds.values,
   );

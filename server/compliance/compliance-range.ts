@@ -25,8 +25,8 @@ export function daysBefore(from: Month, to: Month): DayRange {
 }
 
 /**
- * SQL that is true for the rows of `compliance_days` (d) joined to `stores` (s) and `rules` (r) that
- * the actor may see and asked for, whatever the days.
+ * SQL that is true for the rows of `compliance_months` (d) joined to `stores` (s) and `rules` (r) that
+ * the actor may see and asked for, whatever the months.
  */
 export function complianceFilter(actor: Actor, query: Filters, binds: Binds): string {
   const all = [visibleStores(actor, 'compliance.read', binds)];
@@ -46,16 +46,16 @@ export function complianceFilter(actor: Actor, query: Filters, binds: Binds): st
 }
 
 export const complianceFrom = `
-  FROM compliance_days d JOIN stores s ON s.id = d.store_id JOIN rules r ON r.id = d.rule_id`;
+  FROM compliance_months d JOIN stores s ON s.id = d.store_id JOIN rules r ON r.id = d.rule_id`;
 
-/** The five sums of the days of which `when` is true, as one JSON value of the counts' own names. */
+/** The five sums of the months of which `when` is true, as one JSON value of the counts' own names. */
 export function sums(when: string): string {
   const sum = (column: string) => `coalesce(sum(d.${column}) FILTER (WHERE ${when}), 0)::int`;
   return `jsonb_build_object('onTime', ${sum('on_time')}, 'late', ${sum('late')},
     'notDone', ${sum('not_done')}, 'excused', ${sum('excused')}, 'covered', ${sum('covered')})`;
 }
 
-/** The rate of the days of which `when` is true, for sorting; what is shown is made from the sums. */
+/** The rate of the months of which `when` is true, for sorting; what is shown is made from the sums. */
 export function rateSql(when: string): string {
   return `sum(d.on_time) FILTER (WHERE ${when})::float
     / nullif(sum(d.on_time + d.late + d.not_done) FILTER (WHERE ${when}), 0)`;

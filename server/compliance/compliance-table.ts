@@ -113,9 +113,9 @@ function conditions(actor: Actor, query: ComplianceQuery, binds: Binds) {
   const before = daysBefore(query.from, query.to);
   const [from, to, earliest] = [days.from, days.to, before.from].map((day) => binds.add(day));
   return {
-    where: `${filter} AND d.day BETWEEN ${earliest} AND ${to}`,
-    inRange: `d.day >= ${from}`,
-    inRangeBefore: `d.day < ${from}`,
+    where: `${filter} AND d.month BETWEEN ${earliest} AND ${to}`,
+    inRange: `d.month >= ${from}`,
+    inRangeBefore: `d.month < ${from}`,
   };
 }
 

@@ -21,8 +21,8 @@ const columns = `
   f.found_at AS "foundAt", p.name AS "foundBy", i.task_id AS "taskId", f.settled_at AS "settledAt",
   q.name AS "settledBy", f.settled_note AS "settledNote"`;
 
-const from = `
-  FROM findings f
+const joinedFrom = (findings: string) => `
+  FROM ${findings} f
   JOIN stores s ON s.id = f.store_id
   JOIN people p ON p.id = f.found_by
   LEFT JOIN people q ON q.id = f.settled_by
@@ -49,13 +49,19 @@ export async function listFindingRows(
   const binds = new Binds();
   const where = conditions(actor, query, binds);
   const [count] = await tenant.rows<{ total: number }>(
-    `SELECT count(*)::int AS total ${from} WHERE ${where}`,
+    `SELECT count(*)::int AS total FROM findings f JOIN stores s ON s.id = f.store_id
+       LEFT JOIN units u ON u.id = f.unit_id WHERE ${where}`,
     binds.values,
   );
   const { page, pageSize } = query;
   const rows = await tenant.rows<FindingRow>(
-    `SELECT ${columns} ${from} WHERE ${where} ORDER BY ${sorts[query.sort]}
-     LIMIT ${binds.add(pageSize)} OFFSET ${binds.add((page - 1) * pageSize)}`,
+    // The page is cut out first; only its rows are joined with all that is shown of them.
+    `WITH page AS MATERIALIZED (
+       SELECT f.* FROM findings f JOIN stores s ON s.id = f.store_id
+         LEFT JOIN units u ON u.id = f.unit_id
+       WHERE ${where} ORDER BY ${sorts[query.sort]}
+       LIMIT ${binds.add(pageSize)} OFFSET ${binds.add((page - 1) * pageSize)})
+     SELECT ${columns} ${joinedFrom('page')} ORDER BY ${sorts[query.sort]}`,
     binds.values,
   );
   return { rows: rows.map(present), total: count?.total ?? 0, page, pageSize };
@@ -65,7 +71,7 @@ export async function listFindingRows(
 export async function findingById(tenant: Tenant, actor: Actor, id: string): Promise<Finding> {
   const binds = new Binds();
   const row = await tenant.row<FindingRow>(
-    `SELECT ${columns} ${from}
+    `SELECT ${columns} ${joinedFrom('findings')}
      WHERE ${visibleStores(actor, 'findings.read', binds)} AND f.id = ${binds.add(id)}`,
     binds.values,
   );

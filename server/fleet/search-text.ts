@@ -13,9 +13,13 @@ export function searchText(q: string, columns: readonly string[], binds: Binds):
     .join(' AND ');
 }
 
-/** SQL that puts `F-2` before `F-10` and `9` before `10`. */
+/**
+ * SQL that puts `F-2` before `F-10` and `9` before `10`. Tags and numbers are codes, not words, so they
+ * compare by their bytes, which takes a fraction of the time.
+ */
 export const naturalOrder = (column: string, direction = '') =>
-  `rtrim(${column}, '0123456789') ${direction}, length(${column}) ${direction}, ${column} ${direction}`;
+  `rtrim(${column}, '0123456789') COLLATE "C" ${direction}, length(${column}) ${direction},
+    ${column} COLLATE "C" ${direction}`;
 
 /** Both directions of a sort over one or more expressions; ties keep the order of `then`. */
 export function bothWays(

@@ -35,16 +35,17 @@ export const unitColumns = `
   motor.installed_on AS "motorInstalledOn", ${lastInspectedAt} AS "lastInspectedAt",
   ${openFindings} AS "openFindings"`;
 
-/** Tables that a condition on units may name; one pump and one motor at most are fitted. */
-export const unitsFrom = `
-  FROM units u
-  JOIN stores s ON s.id = u.store_id
-  JOIN chains c ON c.id = s.chain_id
-  JOIN regions r ON r.id = s.region_id
+const fittedParts = `
   LEFT JOIN components pump
     ON pump.unit_id = u.id AND pump.kind = 'pump' AND pump.removed_on IS NULL
   LEFT JOIN components motor
     ON motor.unit_id = u.id AND motor.kind = 'motor' AND motor.removed_on IS NULL`;
+const unitJoins = `
+  JOIN stores s ON s.id = u.store_id
+  JOIN chains c ON c.id = s.chain_id
+  JOIN regions r ON r.id = s.region_id ${fittedParts}`;
+/** Tables that a condition on units may name; one pump and one motor at most are fitted. */
+export const unitsFrom = `FROM units u ${unitJoins}`;
 
 const byStore = `${naturalOrder('s.number')}, ${naturalOrder('u.tag')}, u.id`;
 export const unitSorts: Readonly<Record<string, string>> = Object.fromEntries([
@@ -99,13 +100,18 @@ export async function pageOfUnits(
   const { page, pageSize } = query;
   const binds = new Binds();
   const where = unitConditions(actor, query, binds);
+  // Parts are looked up for the page alone, unless the filters ask for them.
+  const parts = query.q || query.face ? fittedParts : '';
+  const found = `FROM units u JOIN stores s ON s.id = u.store_id ${parts} WHERE ${where}`;
   const count = await tenant.row<{ total: number }>(
-    `SELECT count(*)::int AS total ${unitsFrom} WHERE ${where}`,
+    `SELECT count(*)::int AS total ${found}`,
     binds.values,
   );
+  const order = unitSorts[query.sort];
   const rows = await tenant.rows<ListRow>(
-    `SELECT ${unitColumns} ${unitsFrom} WHERE ${where} ORDER BY ${unitSorts[query.sort]}
-     LIMIT ${binds.add(pageSize)} OFFSET ${binds.add((page - 1) * pageSize)}`,
+    `WITH page AS MATERIALIZED (SELECT u.* ${found} ORDER BY ${order}
+       LIMIT ${binds.add(pageSize)} OFFSET ${binds.add((page - 1) * pageSize)})
+     SELECT ${unitColumns} FROM page u ${unitJoins} ORDER BY ${order}`,
     binds.values,
   );
   return { rows: rows.map(presentRow), total: count?.total ?? 0, page, pageSize };

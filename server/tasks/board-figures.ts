@@ -4,7 +4,7 @@ import type { readTaskBoard } from '@shared/tasks/tasks-contract';
 import { Binds } from '@db/binds';
 import type { Tenant } from '@db/tenant-transaction';
 import type { Actor } from '../access/actor';
-import { boardStores, taskFilter } from './board-stores';
+import { boardStores, occursBetween, taskFilter } from './board-stores';
 import { closedWindows, share } from './board-strips';
 import { type BoardDays, type BoardQuery, mondayOf } from './board-query';
 
@@ -30,6 +30,7 @@ export async function boardFigures(
      FROM tasks t
      WHERE t.store_id = ANY(ARRAY(SELECT s.id FROM stores s WHERE ${boardStores(actor, query, days, binds)}))
        AND ${taskFilter(query, binds)} AND t.outcome = 'none' AND t.lapses_at > ${at}
+       AND ${occursBetween(days.earliest, addDays(sunday, 2), binds)}
        AND (t.closes_at <= ${at} OR t.due_on BETWEEN ${binds.add(days.today)}::date AND
          ${binds.add(sunday)}::date)`,
     binds.values,
@@ -53,9 +54,9 @@ async function closedSince(
   const row = await tenant.row<{ onTime: number; counted: number }>(
     `SELECT coalesce(sum(c.on_time), 0)::int AS "onTime",
        coalesce(sum(c.on_time + c.late + c.not_done), 0)::int AS counted
-     FROM compliance_days c
+     FROM compliance_weeks c
      WHERE c.store_id = ANY(ARRAY(SELECT s.id FROM stores s WHERE ${boardStores(actor, query, days, binds)}))
-       AND c.day >= ${binds.add(days.from)}::date AND ${closedWindows(query, binds)}`,
+       AND c.week >= ${binds.add(days.from)}::date AND ${closedWindows(query, binds)}`,
     binds.values,
   );
   return row ?? { onTime: 0, counted: 0 };

@@ -15,4 +15,6 @@ export interface BoardDays {
   readonly today: CalendarDate;
   /** The Monday on which the strip of weeks begins. */
   readonly strip: CalendarDate;
+  /** Before it nothing occurs that can still be done; null: nobody knows. */
+  readonly earliest: string | null;
 }

@@ -1,3 +1,4 @@
+import { addDays } from '@shared/calendar/calendar-date';
 import { MOST_DAYS_DEFERRED } from '@shared/tasks/defer-task';
 import { Binds } from '@db/binds';
 import type { Tenant } from '@db/tenant-transaction';
@@ -37,10 +38,11 @@ export async function pageOfBoardStores(
   const tasks = taskFilter(query, binds);
   const at = `${binds.add(now)}::timestamptz`;
   const overdue = `(SELECT count(*)::int FROM tasks t WHERE t.store_id = s.id AND ${tasks}
-    AND t.outcome = 'none' AND t.closes_at <= ${at} AND t.lapses_at > ${at})`;
+    AND t.outcome = 'none' AND t.closes_at <= ${at} AND t.lapses_at > ${at}
+    AND ${occursBetween(days.earliest, addDays(days.today, 2), binds)})`;
   const rate = () =>
     `(SELECT sum(c.on_time)::float8 / nullif(sum(c.on_time + c.late + c.not_done), 0)
-      FROM compliance_days c WHERE c.store_id = s.id AND c.day >= ${binds.add(days.strip)}::date
+      FROM compliance_weeks c WHERE c.store_id = s.id AND c.week >= ${binds.add(days.strip)}::date
         AND ${closedWindows(query, binds)})`;
   const sorts: Readonly<Record<BoardQuery['sort'], () => string>> = {
     number: () => byNumber,
@@ -93,4 +95,10 @@ export function taskFilter({ rule, technician, audience }: BoardQuery, binds: Bi
   if (technician) all.push(`t.assigned_to = ${binds.add(technician)}`);
   if (audience) all.push(`t.audience = ${binds.add(audience)}`);
   return all.join(' AND ');
+}
+
+/** SQL true for the tasks `t` that occur on these days, both ends included. */
+export function occursBetween(from: string | null, to: string, binds: Binds): string {
+  const until = `t.occurs_local < ${binds.add(to)}::date + 1`;
+  return from ? `t.occurs_local >= ${binds.add(from)}::date AND ${until}` : until;
 }

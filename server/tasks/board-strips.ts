@@ -37,11 +37,11 @@ export async function stripsOf(
     onTime: number;
     counted: number;
   }>(
-    `SELECT c.store_id AS "storeId", (c.day - ${from}) / 7 AS week, sum(c.on_time)::int AS "onTime",
+    `SELECT c.store_id AS "storeId", (c.week - ${from}) / 7 AS week, sum(c.on_time)::int AS "onTime",
        sum(c.on_time + c.late + c.not_done)::int AS counted
-     FROM compliance_days c
-     WHERE c.store_id = ANY(${binds.add(storeIds)}::uuid[]) AND c.day >= ${from}
-       AND c.day < ${from} + ${STRIP_WEEKS * 7} AND ${closedWindows(query, binds)}
+     FROM compliance_weeks c
+     WHERE c.store_id = ANY(${binds.add(storeIds)}::uuid[]) AND c.week >= ${from}
+       AND c.week < ${from} + ${STRIP_WEEKS * 7} AND ${closedWindows(query, binds)}
      GROUP BY 1, 2`,
     binds.values,
   );

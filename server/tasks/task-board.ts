@@ -10,6 +10,7 @@ import { type BoardDays, type BoardQuery, mondayOf } from './board-query';
 import { boardFigures } from './board-figures';
 import { pageOfBoardStores } from './board-stores';
 import { stripsOf } from './board-strips';
+import { openSpan } from './open-span';
 import { taskConditions } from './task-conditions';
 import { stateAt } from './task-state-sql';
 
@@ -24,10 +25,11 @@ export async function taskBoard(
   now: Date,
 ): Promise<Board> {
   const today = dateAt(now.getTime(), actor.timeZone);
-  const from = (query.from ?? addDays(mondayOf(today), -14)) as CalendarDate;
+  const from = mondayOf((query.from as CalendarDate | undefined) ?? addDays(today, -14));
   const to = addDays(from, BOARD_WEEKS * 7 - 1);
   const strip = addDays(mondayOf(today), -(STRIP_WEEKS - 1) * 7);
-  const days: BoardDays = { from, to, today, strip };
+  const { earliest } = await openSpan(tenant, now);
+  const days: BoardDays = { from, to, today, strip, earliest };
   const { rows, total } = await pageOfBoardStores(tenant, actor, query, days, now);
   const ids = rows.map(({ storeId }) => storeId);
   const cells = await cellsOf(tenant, actor, query, ids, { from, to }, now);

@@ -45,7 +45,9 @@ export async function taskCalendar(
     today: dateAt(now.getTime(), actor.timeZone),
     days: [...days].map(([date, of]) => ({ date, ...of })),
     tasks: day
-      ? await sortedTasks(tenant, actor, { ...ofDay, from: day, to: day }, now, MOST_OF_A_DAY)
+      ? await sortedTasks(tenant, actor, { ...ofDay, from: day, to: day }, now, {
+          limit: MOST_OF_A_DAY,
+        })
       : [],
   };
 }

@@ -6,6 +6,7 @@ import type { exportTasks } from '@shared/tasks/tasks-contract';
 import type { Binds } from '@db/binds';
 import type { Actor } from '../access/actor';
 import { visibleStores } from '../access/visible-stores';
+import type { OpenSpan } from './open-span';
 
 export type TaskFilters = Omit<QueryOf<typeof exportTasks>, 'format' | 'sort'>;
 
@@ -14,6 +15,7 @@ export type TaskFilters = Omit<QueryOf<typeof exportTasks>, 'format' | 'sort'>;
  * the filters. Places and words are looked up in small tables first, so that counting joins nothing.
  *
  * @param now the instant that decides in which state a task stands
+ * @param span where tasks lie that can be done now, to look nowhere else for them
  */
 export function taskConditions(
   actor: Actor,
@@ -21,6 +23,7 @@ export function taskConditions(
   filters: Partial<TaskFilters>,
   now: Date,
   binds: Binds,
+  span?: OpenSpan,
 ): string {
   const all: string[] = [];
   const places = storeConditions(actor, ability, filters, binds);
@@ -40,10 +43,11 @@ export function taskConditions(
   all.push(...dayConditions(filters, binds), ...wordConditions(filters.q ?? '', binds));
   const at = () => `${binds.add(now)}::timestamptz`;
   if (filters.state) {
-    // Said once for all of them, it rules whole months out.
-    if (filters.state.every(toCome)) all.push(`t.outcome = 'none' AND t.lapses_at > ${at()}`);
-    if (!filters.state.includes('planned') && filters.state.every(toCome)) {
-      all.push(`t.opens_at <= ${at()}`);
+    if (span && onlyOpen(filters)) {
+      // Said once for all of them, these rule whole months out.
+      all.push(`t.outcome = 'none' AND t.lapses_at > ${at()} AND t.opens_at <= ${at()}`);
+      all.push(`t.occurs_local <= ${binds.add(span.latest)}::date`);
+      if (span.earliest) all.push(`t.occurs_local >= ${binds.add(span.earliest)}::date`);
     }
     all.push(anyOf(filters.state.map((state) => inState[state](at()))));
   }
@@ -68,8 +72,9 @@ export function storeConditions(
 
 const anyOf = (parts: readonly string[]) => `(${parts.length > 0 ? parts.join(' OR ') : 'false'})`;
 
-/** Whether a task in this state can still be done. */
-const toCome = (state: TaskState) => ['planned', 'open', 'due-soon', 'overdue'].includes(state);
+/** Whether the filters ask for nothing but what can be done now. */
+export const onlyOpen = ({ state }: Partial<TaskFilters>): boolean =>
+  state?.every((it) => it === 'open' || it === 'due-soon' || it === 'overdue') ?? false;
 
 /** The same rule as shared/tasks/task-state.ts, as ranges that an index can serve. */
 const inState: Readonly<Record<TaskState, (now: string) => string>> = {

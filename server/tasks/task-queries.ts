@@ -7,8 +7,9 @@ import type { Tenant } from '@db/tenant-transaction';
 import type { Actor } from '../access/actor';
 import { cursorBatches } from '../exports/read-batches';
 import { naturalOrder } from '../fleet/search-text';
+import { type OpenSpan, openSpan } from './open-span';
 import { type Task, type TaskRecord, presentTask, taskColumns, taskJoins } from './present-task';
-import { type TaskFilters, taskConditions } from './task-conditions';
+import { type TaskFilters, onlyOpen, taskConditions } from './task-conditions';
 
 type ListQuery = QueryOf<typeof listTasks>;
 
@@ -41,14 +42,16 @@ export async function pageOfTasks(
 ): Promise<ReplyOf<typeof listTasks>> {
   const { page, pageSize } = query;
   const binds = new Binds();
-  const where = taskConditions(actor, 'tasks.read', query, now, binds);
+  const span = onlyOpen(query) ? await openSpan(tenant, now) : undefined;
+  const where = taskConditions(actor, 'tasks.read', query, now, binds, span);
   const count = await tenant.row<{ total: number }>(
     `SELECT count(*)::int AS total
      FROM (SELECT FROM tasks t WHERE ${where} LIMIT ${MOST_LISTED + 1}) counted`,
     binds.values,
   );
   const total = count?.total ?? 0;
-  const rows = await sortedTasks(tenant, actor, query, now, pageSize, (page - 1) * pageSize);
+  const cut = { limit: pageSize, offset: (page - 1) * pageSize };
+  const rows = await sortedTasks(tenant, actor, query, now, cut, span);
   return {
     rows,
     total: Math.min(total, MOST_LISTED),
@@ -64,11 +67,11 @@ export async function sortedTasks(
   actor: Actor,
   { sort, ...filters }: Partial<TaskFilters> & Pick<ListQuery, 'sort'>,
   now: Date,
-  limit: number,
-  offset = 0,
+  { limit, offset = 0 }: { limit: number; offset?: number },
+  span?: OpenSpan,
 ): Promise<Task[]> {
   const binds = new Binds();
-  const where = taskConditions(actor, 'tasks.read', filters, now, binds);
+  const where = taskConditions(actor, 'tasks.read', filters, now, binds, span);
   const { by, join = '' } = sorts[sort];
   // The page is cut out first; only its rows are joined with all that is shown of them.
   const rows = await tenant.rows<TaskRecord>(

@@ -108,7 +108,7 @@ export const readTaskBoard = endpoint({
   access: 'board.read',
   query: z.strictObject({
     ...placeFilters,
-    /** The first day; without one the Monday two weeks back. */
+    /** A day of the first week, which begins on its Monday; without one the week two weeks back. */
     from: date.optional(),
     sort: z.enum(boardSorts).default('number'),
     page: z.coerce.number().int().min(1).max(10_000).default(1),

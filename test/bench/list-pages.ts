@@ -28,7 +28,7 @@ export function listPages({ today, storeId, technicianId, ruleId }: FleetFacts):
   return [
     page('tasks, to be done', `/tasks?${active}`),
     page('tasks, all', '/tasks'),
-    page('tasks, all, page 100', '/tasks?page=100'),
+    page('tasks, all, page 20', '/tasks?page=20'),
     page('tasks, searched', `/tasks?${active}&q=motor%20f-2`),
     page('tasks, overdue, by store', '/tasks?state=overdue&sort=store'),
     page('tasks of a technician', `/tasks?technician=${technicianId}&${active}`),

@@ -1,5 +1,5 @@
 import type { Sequelize } from 'sequelize';
-import { type CalendarDate, addDays, addMonths } from '@shared/calendar/calendar-date';
+import { type CalendarDate, addMonths } from '@shared/calendar/calendar-date';
 import { inTenant } from '@db/tenant-transaction';
 import type { Actor } from '@server/access/actor';
 import { countClosedWindows } from '@server/compliance/count-closed-windows';
@@ -47,7 +47,7 @@ export async function makeFleet(
     bind: [organisationId, `Fleet of ${stores} stores`, 'America/Chicago'],
   });
   await owner.query('SELECT ensure_task_months($1, $2)', {
-    bind: [addDays(first, -31), addMonths(today, 14)],
+    bind: [first, addMonths(today, 4)],
   });
   tell('places, people and rules');
   const places = fleetPlaces(stores, random, today);
