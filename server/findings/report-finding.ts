@@ -6,6 +6,7 @@ import type { Tenant } from '@db/tenant-transaction';
 import type { Actor } from '../access/actor';
 import { authoriseAt } from '../access/authorise';
 import { recordEvent } from '../audit/record-event';
+import { photoFaults } from '../uploads/photo-faults';
 
 /** Writes down what somebody saw outside an inspection. */
 export async function reportFinding(
@@ -31,6 +32,12 @@ export async function reportFinding(
       ]);
     }
   }
+  const faults = await photoFaults(
+    tenant,
+    report.storeId,
+    new Map(report.photoIds.map((id, index) => [id, `photoIds.${index}`])),
+  );
+  if (faults.length > 0) throw invalid(faults);
   await tenant.rows(
     `INSERT INTO findings (id, organisation_id, store_id, unit_id, component_id, component_kind, cause,
        severity, note, photo_ids, found_at, found_by)

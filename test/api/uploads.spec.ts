@@ -155,6 +155,25 @@ describe('photos', () => {
     await app.browser().get(`/photos/${body.id}`).expect(401);
   });
 
+  it('belong to a reported finding of their own store', async () => {
+    const report = (photoId: string) =>
+      technician.post('/findings', {
+        id: randomUUID(),
+        storeId: fleet.storeId,
+        unitId: fleet.unitId,
+        componentKind: 'pump',
+        cause: 'worn-seal',
+        severity: 'plan',
+        note: 'Drips at the slot',
+        photoIds: [photoId],
+      });
+    const { body } = await report(randomUUID()).expect(422);
+    expect(body.errors).toMatchObject([{ field: 'photoIds.0', reason: 'unknown-photo' }]);
+    const own = await send(await canvas(40, 30).jpeg().toBuffer()).expect(200);
+    const found = await report(own.body.id).expect(200);
+    expect(found.body.photoIds).toEqual([own.body.id]);
+  });
+
   it('belong to the steps of a task in their own store', async () => {
     app.setNow('2026-06-10T15:00:00Z');
     const work = await makeWork(app.db, fleet);

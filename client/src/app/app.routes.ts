@@ -21,11 +21,11 @@ const features: Routes = [
   { path: 'procedures', loadChildren: () => import('./procedures/procedures.routes') },
   { path: 'programmes', loadChildren: () => import('./programmes/programmes.routes') },
   { path: 'findings', loadChildren: () => import('./findings/findings.routes') },
+  { path: 'visits', loadChildren: () => import('./visits/visits.routes') },
+  { path: 'people', loadChildren: () => import('./people/people.routes') },
   { path: 'compliance', loadChildren: () => import('./compliance/compliance.routes') },
   { path: 'digests', loadChildren: () => import('./digests/digests.routes') },
   { path: 'letters', loadChildren: () => import('./letters/letters.routes') },
-  { path: 'visits', loadChildren: () => import('./visits/visits.routes') },
-  { path: 'people', loadChildren: () => import('./people/people.routes') },
   { path: 'account', loadChildren: () => import('./sign-in/account.routes') },
 ];
 

@@ -68,6 +68,12 @@ export const navigation: readonly NavigationItem[] = [
     anyOf: ['findings.read'],
   },
   {
+    path: 'people',
+    label: $localize`:@@people.title:People`,
+    icon: 'people',
+    anyOf: ['people.read'],
+  },
+  {
     path: 'compliance',
     label: $localize`:@@compliance.title:Compliance`,
     icon: 'chart',
@@ -84,12 +90,6 @@ export const navigation: readonly NavigationItem[] = [
     label: $localize`:@@letters.title:Letters`,
     icon: 'mail',
     anyOf: ['mail.read'],
-  },
-  {
-    path: 'people',
-    label: $localize`:@@people.title:People`,
-    icon: 'people',
-    anyOf: ['people.read'],
   },
 ];
 

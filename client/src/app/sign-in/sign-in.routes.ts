@@ -1,4 +1,5 @@
 import type { Routes } from '@angular/router';
+import { freshToken } from './fresh-token-guard';
 
 /** The pages for people who are not signed in. */
 const routes: Routes = [
@@ -6,6 +7,7 @@ const routes: Routes = [
     path: '',
     // The bare address belongs to the frame, which sends strangers here.
     canMatch: [(_route, segments) => segments.length > 0],
+    canActivateChild: [freshToken],
     loadComponent: () => import('./entrance/entrance').then((m) => m.Entrance),
     children: [
       {

@@ -21,6 +21,7 @@ import { Notices } from '../../ui/notice/notices';
 import { PageHeader } from '../../ui/page-header/page-header';
 import { PageLoading } from '../../ui/page-states/page-loading';
 import { TimeInZonePipe } from '../../ui/text/time-in-zone-pipe';
+import { PhotoStrip } from '../../uploads/photo-strip';
 import { FindingWords } from '../finding-words';
 import type { Finding } from '../findings-api';
 import { FindingsApi } from '../findings-api';
@@ -39,6 +40,7 @@ import { SeverityMark } from '../severity-mark/severity-mark';
     MatButton,
     PageHeader,
     PageLoading,
+    PhotoStrip,
     ProblemView,
     RouterLink,
     SeverityMark,
@@ -67,6 +69,12 @@ export class FindingPage {
   );
   protected readonly busy = signal(false);
   protected readonly maySettle = this.session.can('findings.settle');
+  /** Photos taken at the steps of the inspection behind the finding. */
+  protected readonly inspectionPhotos = computed(() =>
+    (this.sheet()?.inspection?.readings ?? []).flatMap(({ reading }) =>
+      reading.kind === 'photo' ? reading.photoIds : [],
+    ),
+  );
   protected readonly title = computed(() => {
     const finding = this.finding();
     return finding ? this.words.cause(finding.cause) : '';
