@@ -216,8 +216,8 @@ export class ProcedureEditor implements HoldsWork {
 
   private refused(failure: unknown, mine: ProcedureContent): void {
     const form = this.form();
-    this.labels.set(draftLabels(form));
     this.general.set(showInForm(form, draftFaults(failure)));
+    this.labels.set(draftLabels(form));
     this.stepList()?.openFaulty();
     // The opened steps must be drawn before the summary's links can lead into them.
     setTimeout(() => this.tries.update((count) => count + 1));

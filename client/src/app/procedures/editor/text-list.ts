@@ -11,7 +11,7 @@ import { TextPair } from './text-pair';
   selector: 'vw-text-list',
   imports: [Icon, MatButton, MatIconButton, TextPair],
   template: `
-    <h3>{{ heading() }}</h3>
+    <h2>{{ heading() }}</h2>
     @for (pair of list().controls; track pair; let index = $index) {
       <div class="item">
         <vw-text-pair
@@ -37,6 +37,9 @@ import { TextPair } from './text-pair';
       display: grid;
       gap: var(--vw-space-2);
       justify-items: start;
+    }
+    h2 {
+      font-size: 1rem;
     }
     .item {
       display: grid;

@@ -26,7 +26,7 @@ import { WindowPicture } from '../window-picture/window-picture';
           rule().name
         }}</a>
         @if (rule().retiredAt) {
-          <span class="mark" i18n="@@programmes.mark.retired">retired</span>
+          &ngsp;<span class="mark" i18n="@@programmes.mark.retired">retired</span>
         }
       </h3>
       <p class="often">{{ rule().words[language] }}</p>

@@ -27,7 +27,7 @@ import { RuleChanges } from '../rule-changes/rule-changes';
             <h3>
               <ng-container i18n="@@programmes.revision">Revision {{ item.revision }}</ng-container>
               @if ($first) {
-                <span class="mark" i18n="@@programmes.in-force">in force</span>
+                &ngsp;<span class="mark" i18n="@@programmes.in-force">in force</span>
               }
             </h3>
             <p class="vw-small vw-secondary">
